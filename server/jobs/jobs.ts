@@ -1,0 +1,10 @@
+import { type AppContext } from '../context.ts'
+import { type Job } from './scheduler.ts'
+import { sweepExpired } from './sweepExpired.ts'
+
+const hourMs = 3600 * 1000
+
+/** What the server does beside answering. */
+export const jobs = (context: AppContext): Job[] => [
+  { name: 'sweep what has expired', everyMs: hourMs, run: () => sweepExpired(context.db) },
+]
