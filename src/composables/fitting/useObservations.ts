@@ -60,7 +60,7 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
   const observations = computed<ShownObservation[]>(() => {
     const lastNumber = Math.max(0, ...stored.value.map(({ number }) => number))
     const drafts = creations.value.map((one, i): ShownObservation => ({
-      photographId: null, mark: null, direction: null, towards: null, line: null, amount: null, note: '', ...one.body, id: one.id, number: lastNumber + i + 1, sampleNumber: sampleNumber(),
+      ...one.body, id: one.id, number: lastNumber + i + 1, sampleNumber: sampleNumber(),
       state: 'noted', letBeReason: '', readings: [], predicted: null, by: me(), createdAt: one.createdAt, version: 1, unsent: true,
     }))
     return [...stored.value.map((one) => ({ ...one, unsent: false })), ...drafts].map((one) => laidOver(one, pending.value.get(one.id)?.patch))
@@ -74,7 +74,13 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
     return id
   }
 
-  async function sendCreation(id: string) {
+  const onTheWay = new Map<string, Promise<void>>()
+  function sendCreation(id: string): Promise<void> {
+    const sending = onTheWay.get(id) ?? deliver(id).finally(() => onTheWay.delete(id))
+    onTheWay.set(id, sending)
+    return sending
+  }
+  async function deliver(id: string) {
     const creation = creations.value.find((one) => one.id === id)
     if (!creation || creation.sending) return
     setCreation(id, { sending: true, message: '' })
@@ -145,6 +151,12 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
     setPending(id, null)
   }
 
+  /** True where the server does not have it, once a request under way has ended. */
+  async function isOnlyHere(id: string): Promise<boolean> {
+    await onTheWay.get(id)
+    return creations.value.some((one) => one.id === id)
+  }
+
   const waitingCount = computed(() => creations.value.length + [...pending.value.keys()].filter((id) => !creations.value.some((one) => one.id === id)).length)
   const saveState = computed<'idle' | 'saving' | 'saved' | 'kept' | 'clash'>(() => {
     const patches = [...pending.value.values()]
@@ -171,7 +183,7 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
   })
 
   return {
-    observations, saveState, waitingCount, clashes, add, edit, settleClash, sendAll, giveUp, idOf, messageFor, place,
+    observations, saveState, waitingCount, clashes, add, edit, settleClash, sendAll, giveUp, isOnlyHere, idOf, messageFor, place,
     /** the server's list, as read */
     receive: (list: readonly FittingObservation[]) => { stored.value = list; sendAll() },
     forget: (id: string) => { stored.value = stored.value.filter((one) => one.id !== idOf(id)); setPending(idOf(id), null) },
