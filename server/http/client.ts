@@ -11,7 +11,9 @@ import { DomainError } from '#shared/errors.ts'
 export function client(folder: string): Router {
   const root = resolve(folder)
   const router = Router()
-  router.use('/assets', express.static(join(root, 'assets'), { immutable: true, maxAge: '1y', index: false, fallthrough: false }))
+  router.use('/assets', express.static(join(root, 'assets'), { immutable: true, maxAge: '1y', index: false }))
+  // Answering with the page would hide that a script is missing, and a browser would try to run it.
+  router.use('/assets', () => { throw noFile() })
   router.use(express.static(root, { index: false, cacheControl: true, maxAge: 0 }))
   router.get('/{*path}', page(root))
   return router
@@ -20,12 +22,14 @@ export function client(folder: string): Router {
 function page(root: string): RequestHandler {
   let html: string | null = null
   return (req, res) => {
-    // An address with an ending was meant as a file: answering with the page would hide that it is missing.
-    if (/\.[a-z0-9]{2,5}$/i.test(req.path) && !req.accepts('html')) throw new DomainError('not-found', 'There is no such file.')
+    // An address with an ending was meant as a file, unless a person typed it.
+    if (/\.[a-z0-9]{2,5}$/i.test(req.path) && !req.get('accept')?.includes('text/html')) throw noFile()
     html ??= readPage(root)
     res.set('Cache-Control', 'no-store').type('html').send(html.replaceAll('__CSP_NONCE__', String(res.locals.cspNonce)))
   }
 }
+
+const noFile = () => new DomainError('not-found', 'There is no such file.')
 
 function readPage(root: string): string {
   try {

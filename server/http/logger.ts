@@ -3,13 +3,11 @@ import { type IncomingMessage, type ServerResponse } from 'node:http'
 import { type Request } from 'express'
 import { type DestinationStream, type Logger, pino } from 'pino'
 import { pinoHttp } from 'pino-http'
+import { describeError } from './describeError.ts'
 
 /** The process log: never a cookie, a body, a token, an e-mail address or a file name. */
 export function createLogger(level: string, destination?: DestinationStream): Logger {
-  const options = {
-    level,
-    redact: ['req.headers', 'res.headers', 'req.body', '*.cookie', '*.password', '*.token', '*.email', 'err.parameters', 'err.params', 'err.detail', 'err.cause.detail', 'err.query'],
-  }
+  const options = { level, serializers: { err: describeError }, redact: ['req.headers', 'res.headers', '*.cookie', '*.password', '*.token', '*.email'] }
   return destination ? pino(options, destination) : pino(options)
 }
 
@@ -25,7 +23,7 @@ export const requestLog = (logger: Logger) => pinoHttp({
   serializers: {
     req: (req: { id: string; method: string; raw: Request }) => ({ id: req.id, method: req.method }),
     res: (res: { statusCode: number }) => ({ status: res.statusCode }),
-    err: undefined as never,
+    err: describeError,
   },
   // Not customProps: those are read at the start as well, before the route is known, and would stand twice in the line.
   customSuccessObject: named,

@@ -7,14 +7,19 @@ import { DomainError } from '#shared/errors.ts'
 import { type SignedIn } from '../access/checkAccess.ts'
 import { type AppContext } from '../context.ts'
 
-type Limit = { per: 'address' | 'person' | 'email'; times: number; seconds: number }
+type Limit = { per: 'address' | 'person' | 'email' | 'email and address'; times: number; seconds: number }
 const minute = 60
 const hour = 60 * minute
 
 /** Route id → how often it may be called. Kept in PostgreSQL, so all instances count together. */
 export const limits: Readonly<Record<string, readonly Limit[]>> = {
-  // per e-mail slows guessing one password from many addresses, per address guessing many from one
-  'account.sign-in': [{ per: 'address', times: 30, seconds: 15 * minute }, { per: 'email', times: 10, seconds: 15 * minute }],
+  // Guessing one person's password from one place is slowed first; the limit over all places is wider, since anyone could use
+  // it up to keep that person out.
+  'account.sign-in': [
+    { per: 'address', times: 30, seconds: 15 * minute },
+    { per: 'email and address', times: 10, seconds: 15 * minute },
+    { per: 'email', times: 60, seconds: hour },
+  ],
   'account.sign-up': [{ per: 'address', times: 10, seconds: hour }],
   'account.request-reset': [{ per: 'address', times: 20, seconds: hour }, { per: 'email', times: 3, seconds: hour }],
   'account.reset': [{ per: 'address', times: 20, seconds: hour }],
@@ -34,11 +39,14 @@ export async function limitBeforeBody(context: AppContext, route: Route, req: Re
 }
 
 /** Counts a call by the e-mail in its body. @throws DomainError 'request.too-many' */
-export async function limitByBody(context: AppContext, route: Route, body: unknown): Promise<void> {
-  const limit = limits[route.id]?.find(({ per }) => per === 'email')
-  if (!limit || typeof body !== 'object' || body === null || !('email' in body)) return
+export async function limitByBody(context: AppContext, route: Route, req: Request, body: unknown): Promise<void> {
+  if (typeof body !== 'object' || body === null || !('email' in body)) return
   // Hashed: the table of counts need not know who tried to sign in.
-  await count(context, route.id, limit, createHash('sha256').update(String(body.email)).digest('base64url'))
+  const email = createHash('sha256').update(String(body.email)).digest('base64url')
+  for (const limit of limits[route.id] ?? []) {
+    if (limit.per === 'email and address') await count(context, route.id, limit, `${email} ${networkOf(req.ip ?? '')}`)
+    if (limit.per === 'email') await count(context, route.id, limit, email)
+  }
 }
 
 async function count(context: AppContext, subject: string, limit: Limit, who: string): Promise<void> {

@@ -69,7 +69,7 @@ export function serve<const R extends Route>(router: Router, context: AppContext
         body: parsePart(route.body, received.body, 'request'),
         ...granted, file: received.file, req, res,
       }
-      await limitByBody(context, route, call.body)
+      await limitByBody(context, route, req, call.body)
       // The compiler cannot follow the conditional types through the parsing; the contract holds them together.
       const run = (db: Queryable, createdId: string) => Promise.resolve(handler({ ...call, db, createdId } as unknown as Call<R>))
       const answer = await runOnce(context, route, req, user, call.body, async (db, createdId) => checkAnswer(context, route, await run(db, createdId)))
