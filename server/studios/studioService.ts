@@ -17,8 +17,10 @@ export const studioService = ({ db }: { db: Queryable }) => ({
   },
 
   async read(studioId: string): Promise<Studio> {
-    const [row, members, use] = [await studioQueries(db).find(studioId), await studioQueries(db).members(studioId), await studioQueries(db).photographUse(studioId)]
+    const row = await studioQueries(db).find(studioId)
     if (!row) throw new DomainError('not-found', 'There is no such studio.')
+    const members = await studioQueries(db).members(studioId)
+    const use = await studioQueries(db).photographUse(studioId)
     return {
       id: row.id, name: row.name,
       members: members.map((member) => ({ ...member, joinedAt: member.joinedAt.toISOString() })),

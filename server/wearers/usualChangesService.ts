@@ -5,7 +5,6 @@ import { wearerQueries } from '#db/queries/wearers.ts'
 import { type usualChange } from '#shared/contracts/wearer.ts'
 import { DomainError } from '#shared/errors.ts'
 import { type Looking } from './wearerService.ts'
-import { valueOfReadings } from './valueOfReadings.ts'
 
 type UsualChange = z.infer<typeof usualChange>
 /** One project may be chance; the same change on two is a habit of this body's clothes. */
@@ -29,6 +28,12 @@ function group(settled: readonly SettledChange[]): UsualChange[] {
   return [...groups.values()].filter((same) => same.length >= leastCount).map((same) => {
     const amounts = same.map(({ amountMm }) => amountMm)
     const { cause, title, garment } = same.at(-1)!
-    return { cause, title, garmentFamily: garment.kind, count: same.length, medianMm: valueOfReadings(amounts), leastMm: Math.min(...amounts), mostMm: Math.max(...amounts) }
+    return { cause, title, garmentFamily: garment.kind, count: same.length, medianMm: median(amounts), leastMm: Math.min(...amounts), mostMm: Math.max(...amounts) }
   }).sort((a, b) => b.count - a.count)
+}
+
+function median(values: readonly number[]): number {
+  const sorted = values.toSorted((a, b) => a - b)
+  const middle = (sorted.length - 1) / 2
+  return (sorted[Math.floor(middle)]! + sorted[Math.ceil(middle)]!) / 2
 }

@@ -6,8 +6,8 @@ import { type MeasurementSetRow } from '#db/schema/wearers.ts'
 import { type RouteBody } from '#shared/contracts/route.ts'
 import { type MeasurementSet, type Wearer, type createSet, type createWearer, type updateSet, type updateWearer } from '#shared/contracts/wearer.ts'
 import { DomainError } from '#shared/errors.ts'
+import { combineReadings, readingToleranceMm } from '#shared/measurements/combineReadings.ts'
 import { staleVersion } from '../staleVersion.ts'
-import { valueOfReadings } from './valueOfReadings.ts'
 
 export type WearerService = ReturnType<typeof wearerService>
 /** Who looks: a member with the role `wearer` sees only wearers whose account is theirs. */
@@ -86,7 +86,10 @@ function withValues(input: RouteBody<typeof createSet>) {
   const codes = input.measurements.map(({ code }) => code)
   const twice = codes.find((code, i) => codes.indexOf(code) !== i)
   if (twice) throw new DomainError('request.invalid', `The measurement ${twice} is there twice. Send its readings together.`, { measurements: `${twice} is there twice.` })
-  return { ...input, measurements: input.measurements.map((measurement) => ({ ...measurement, valueMm: valueOfReadings(measurement.readingsMm) })) }
+  return {
+    ...input,
+    measurements: input.measurements.map(({ code, readingsMm }) => ({ code, readingsMm, valueMm: combineReadings(readingsMm, readingToleranceMm(code))!.valueMm })),
+  }
 }
 
 const toWearer = (row: WearerWithCounts): Wearer => ({
