@@ -1,11 +1,10 @@
-import { mkdir, rm } from 'node:fs/promises'
-import { tmpdir } from 'node:os'
-import { join } from 'node:path'
+import { rm } from 'node:fs/promises'
 import express, { type Request, type RequestHandler, type Response } from 'express'
 import multer from 'multer'
 import { photographLimits } from '#shared/contracts/photograph.ts'
 import { type Route } from '#shared/contracts/route.ts'
 import { DomainError } from '#shared/errors.ts'
+import { uploadFolder } from './uploadFolder.ts'
 
 /** An uploaded file in a temporary place. Its name and type are what the sender says: trust neither. */
 export type ReceivedFile = { path: string; bytes: number }
@@ -15,9 +14,8 @@ const jsonBytes = 1024 * 1024
 const readJson = express.json({ limit: jsonBytes, type: 'application/json', strict: true })
 
 // On disk and not in memory: many uploads at once must not add up to many times 25 MB of heap.
-export const uploadFolder = join(tmpdir(), 'proofcloth-uploads')
 const readUpload = multer({
-  storage: multer.diskStorage({ destination: (_req, _file, done) => { mkdir(uploadFolder, { recursive: true, mode: 0o700 }).then(() => done(null, uploadFolder), (error: Error) => done(error, uploadFolder)) } }),
+  storage: multer.diskStorage({ destination: (_req, _file, done) => { uploadFolder().then((folder) => done(null, folder), (error: Error) => done(error, '')) } }),
   limits: { fileSize: photographLimits.bytes, files: 1, fields: 12, fieldNameSize: 60, fieldSize: 8 * 1024, parts: 14, headerPairs: 40 },
 }).single('photograph')
 
@@ -44,7 +42,7 @@ export async function receiveBody(route: Route, req: Request, res: Response): Pr
 }
 
 function expectType(req: Request, type: string): void {
-  if (req.is(type) === type || (type === 'multipart/form-data' && req.is('multipart/form-data'))) return
+  if (req.is(type)) return
   throw new DomainError('request.invalid', `Send this request as ${type}.`)
 }
 

@@ -61,6 +61,7 @@ export function serve<const R extends Route>(router: Router, context: AppContext
     const granted = await checkAccess(context.db, route.access, user, req.params)
     await limitBeforeBody(context, route, req, user)
     const received = await receiveBody(route, req, res)
+    let answer: unknown
     try {
       checkText([req.params, req.query, received.body])
       const call = {
@@ -72,11 +73,12 @@ export function serve<const R extends Route>(router: Router, context: AppContext
       await limitByBody(context, route, req, call.body)
       // The compiler cannot follow the conditional types through the parsing; the contract holds them together.
       const run = (db: Queryable, createdId: string) => Promise.resolve(handler({ ...call, db, createdId } as unknown as Call<R>))
-      const answer = await runOnce(context, route, req, user, call.body, async (db, createdId) => checkAnswer(context, route, await run(db, createdId)))
-      if (!res.headersSent && !route.produces) send(res, route, answer)
+      answer = await runOnce(context, route, req, user, call.body, async (db, createdId) => checkAnswer(context, route, await run(db, createdId)))
     } finally {
+      // before the answer: who has it may count on nothing of the upload lying about
       await received.remove()
     }
+    if (!res.headersSent && !route.produces) send(res, route, answer)
   })
 }
 
