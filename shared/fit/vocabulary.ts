@@ -3,7 +3,7 @@
  * may be said beside a sign. Screens and prints read their words from here, never from code of their own.
  */
 import {
-  type Amount, type AmountKind, type Direction, type Line, type Observation, type Severity, type Side, type Sign, type Target, type View, type Zone,
+  type Amount, type AmountKind, type Direction, type Line, type Observation, type PieceRole, type Severity, type Side, type Sign, type Target, type View, type Zone,
 } from './types.ts'
 
 export type MarkKind = 'drag-line' | 'gape' | 'tight' | 'excess' | 'length' | 'balance' | 'place'
@@ -33,6 +33,14 @@ export const amountKindWords: Record<AmountKind, { name: string; hint: string }>
   gap: { name: 'Opening that will not close', hint: 'From edge to edge, with nothing pulled.' },
   shift: { name: 'Distance off its place', hint: 'From where it is to where it belongs.' },
 }
+
+export const pieceWords: Record<PieceRole, string> = {
+  'skirt-front': 'Skirt front', 'skirt-back': 'Skirt back', 'trouser-front': 'Trouser front', 'trouser-back': 'Trouser back', 'bodice-front': 'Front', 'bodice-back': 'Back',
+  'side-front': 'Side front', 'side-back': 'Side back', yoke: 'Yoke', sleeve: 'Sleeve', 'under-sleeve': 'Under sleeve', cuff: 'Cuff', collar: 'Collar', 'collar-stand': 'Collar stand',
+  waistband: 'Waistband', 'neck-facing': 'Neck facing', 'front-facing': 'Front facing', 'armhole-facing': 'Armhole facing', casing: 'Casing', pocket: 'Pocket', lining: 'Lining', fly: 'Fly',
+  belt: 'Belt', tier: 'Tier',
+}
+export const markKindWords: Record<MarkKind, string> = { 'drag-line': 'Drag line', gape: 'Gape', tight: 'Tight', excess: 'Excess', length: 'Length', balance: 'Balance', place: 'Place' }
 
 /** Which views of a photograph show a zone; a detail shows any. */
 export const zoneViews: Record<Zone, readonly View[]> = {
