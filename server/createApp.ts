@@ -19,6 +19,8 @@ const methods = new Set(['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE'])
 export function createApp(context: AppContext): Express {
   const app = express()
   app.disable('x-powered-by')
+  // Answers of the API are never kept, so a digest of each would be work for nothing; files have their own.
+  app.disable('etag')
   app.set('trust proxy', context.settings.trustProxy)
   app.set('query parser', 'simple')
 

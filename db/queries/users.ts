@@ -1,7 +1,15 @@
-import { eq } from 'drizzle-orm'
+import { eq, sql } from 'drizzle-orm'
 import { type Queryable } from '#db/client.ts'
+import { prepared } from '#db/prepared.ts'
 import { memberships, studios } from '#db/schema/studios.ts'
 import { type UserRow, users } from '#db/schema/users.ts'
+
+const withMemberships = prepared((db) => db.select({
+  id: users.id, name: users.name, email: users.email, units: users.units,
+  membership: { studioId: studios.id, studioName: studios.name, role: memberships.role },
+}).from(users).leftJoin(memberships, eq(memberships.userId, users.id)).leftJoin(studios, eq(studios.id, memberships.studioId))
+  .where(eq(users.id, sql.placeholder('userId'))).orderBy(memberships.createdAt, memberships.studioId)
+  .prepare('user_with_memberships'))
 
 export const userQueries = (db: Queryable) => ({
   async find(id: string): Promise<UserRow | null> {
@@ -20,10 +28,8 @@ export const userQueries = (db: Queryable) => ({
   async update(id: string, set: Partial<Pick<UserRow, 'name' | 'units' | 'passwordHash'>>): Promise<void> {
     if (Object.keys(set).length > 0) await db.update(users).set(set).where(eq(users.id, id))
   },
-  /** Oldest first, so that a person's own studio leads. */
-  async membershipsOf(userId: string) {
-    return db.select({ studioId: memberships.studioId, studioName: studios.name, role: memberships.role })
-      .from(memberships).innerJoin(studios, eq(studios.id, memberships.studioId))
-      .where(eq(memberships.userId, userId)).orderBy(memberships.createdAt, memberships.studioId)
+  /** The account with its memberships, oldest first so that a person's own studio leads; one row per membership, none of it null only without any. */
+  async withMemberships(userId: string) {
+    return withMemberships(db).execute({ userId })
   },
 })

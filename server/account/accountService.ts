@@ -54,9 +54,11 @@ export const accountService = ({ db, sendResetMail }: { db: Queryable; sendReset
   },
 
   async me(userId: string): Promise<Me> {
-    const user = await userQueries(db).find(userId)
+    const rows = await userQueries(db).withMemberships(userId)
+    const [user] = rows
     if (!user) throw new DomainError('sign-in.needed', 'This account is gone. Sign in with another one.')
-    return { id: user.id, name: user.name, email: user.email, units: user.units, memberships: await userQueries(db).membershipsOf(userId) }
+    const memberships = rows.flatMap(({ membership }) => (isMembership(membership) ? [membership] : []))
+    return { id: user.id, name: user.name, email: user.email, units: user.units, memberships }
   },
 
   async update(userId: string, set: RouteBody<typeof updateMe>): Promise<Me> {
@@ -117,3 +119,7 @@ export const accountService = ({ db, sendResetMail }: { db: Queryable; sendReset
     await auditQueries(db).add('session.ended', { userId })
   },
 })
+
+type Joined = { [Field in keyof Me['memberships'][number]]: Me['memberships'][number][Field] | null }
+/** A left join answers nulls for a person who is a member nowhere. */
+const isMembership = (joined: Joined): joined is Me['memberships'][number] => joined.studioId !== null
