@@ -8,11 +8,13 @@ import { migrate } from '#db/migrate.ts'
 const templateName = () => `proofcloth_template_${createHash('sha256').update(readFileSync(new URL('../../db/migrations/meta/_journal.json', import.meta.url))).digest('hex').slice(0, 12)}`
 const templateLock = 718_271_001
 
+export type FreshDatabase = { url: string; drop: () => Promise<void> }
+
 /**
  * An empty database with every table, for one test file.
  * @param serverUrl - a PostgreSQL where the user may make databases
  */
-export async function freshDatabase(serverUrl = process.env.TEST_DATABASE_URL): Promise<{ url: string; drop: () => Promise<void> }> {
+export async function freshDatabase(serverUrl = process.env.TEST_DATABASE_URL): Promise<FreshDatabase> {
   if (!serverUrl) throw new Error('Set TEST_DATABASE_URL to a PostgreSQL server where databases may be made.')
   const template = templateName()
   const name = `proofcloth_test_${randomBytes(6).toString('hex')}`
