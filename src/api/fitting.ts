@@ -1,5 +1,5 @@
 import {
-  createObservation, createOwnChange, decideChange, putAnswer, putReading, readFitting, readStory, removeObservation, removeReading, restoreObservation, startSample,
+  createObservation, createOwnChange, decideChange, putAnswer, putReading, readFitting, removeObservation, removeReading, restoreObservation, startSample,
   takeBackChange, updateChange, updateObservation, updateSample,
 } from '#shared/contracts/fitting.ts'
 import { type PhotographSize, readPhotographFile, removePhotograph, restorePhotograph, updatePhotograph, uploadPhotograph } from '#shared/contracts/photograph.ts'
@@ -44,9 +44,6 @@ export function fittingApi(projectId: string, number: number) {
   }
 }
 export type FittingApi = ReturnType<typeof fittingApi>
-
-/** Every sample of a project in order, for comparing. */
-export const fetchStory = (projectId: string, signal?: AbortSignal) => call(readStory, { params: { projectId }, signal })
 
 /** Address of a photograph in one of its three sizes. */
 export const photographUrl = (projectId: string, photographId: string, size: PhotographSize): string =>
