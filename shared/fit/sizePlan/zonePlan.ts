@@ -136,7 +136,8 @@ function easeWarnings(input: PlanInput, zone: ZonePlan): string[] {
     return []
   }
   if (minimumMm === null || easeMm >= minimumMm - 0.5) return []
-  const drafted = designEaseMm !== null && designEaseMm < minimumMm ? ` The pattern itself means {mm:${designEaseMm}}.` : ''
+  const meant = designEaseMm === null || designEaseMm >= minimumMm ? '' : designEaseMm < 0 ? `{mm:${-designEaseMm}} less than the body` : `{mm:${designEaseMm}}`
+  const drafted = meant && ` The pattern itself means ${meant}.`
   const have = easeMm < 0 ? `be {mm:${-easeMm}} smaller than the body` : `have {mm:${easeMm}} of ease`
   return [`${start} ${have}; {mm:${minimumMm}} is the least to wear in cloth that does not stretch.${drafted}`]
 }
