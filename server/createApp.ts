@@ -30,7 +30,7 @@ export function createApp(context: AppContext): Express {
   routes.push(...[service, ...withSession].flatMap(routesOf))
   app.locals.routes = routes
 
-  app.use(requestLog(context.logger), ...securityHeaders(context.settings), compression())
+  app.use(requestLog(context.logger), securityHeaders(context.settings), compression())
   app.use('/api', (req, res, next) => {
     res.set('Cache-Control', 'no-store')
     // Express would answer OPTIONS by itself and so tell which addresses exist.

@@ -17,6 +17,9 @@ import { openStore } from './storage/openStore.ts'
 /** Requests under way may take this long to finish after a stop was asked for. */
 const graceMs = 9000
 
+/** 25 MB over a line of half a megabit a second. */
+const slowestUploadMs = 7 * 60_000
+
 export type RunningServer = {
   url: string
   /** Takes no new requests, lets those under way finish, closes everything; at most ten seconds. */
@@ -35,7 +38,7 @@ export async function startServer(settings: Settings, given: Partial<Pick<AppCon
     storage: given.storage ?? (await openStore(settings.photoStorage)),
     mailer: given.mailer ?? openMailer(settings),
   }
-  const server = createServer({ requestTimeout: 120_000, headersTimeout: 20_000, keepAliveTimeout: 10_000 }, createApp(context))
+  const server = createServer({ requestTimeout: slowestUploadMs, headersTimeout: 20_000, keepAliveTimeout: 10_000 }, createApp(context))
   try {
     server.listen(settings.port, settings.host)
     await once(server, 'listening')

@@ -19,7 +19,7 @@ export const databaseRetrySeconds = 5
 export const errorHandler = (logger: Logger): ErrorRequestHandler => (thrown, req, res, next) => {
   if (res.headersSent) return next(thrown)
   const error = expected(thrown)
-  const requestId = String(req.id ?? '')
+  const requestId = req.id ?? ''
   if (!error) {
     logger.error({ err: thrown, requestId }, 'unexpected error')
     res.status(500).json({ error: { code: 'server.failed', message: 'Something went wrong on the server. Nothing was changed; try again.', details: {}, requestId } })

@@ -1,5 +1,5 @@
 import { type Request, type Response, type Router } from 'express'
-import { type z } from 'zod'
+import { z } from 'zod'
 import { type Queryable } from '#db/client.ts'
 import { type ProjectRow } from '#db/schema/projects.ts'
 import { type MembershipRow } from '#db/schema/studios.ts'
@@ -46,6 +46,9 @@ export type Call<R extends Route> = {
 export type Answer<R extends Route> = R['response'] extends z.ZodType ? z.output<R['response']> : void
 export type Handler<R extends Route> = (call: Call<R>) => Answer<R> | Promise<Answer<R>>
 
+/** A route that names no query takes none: a misspelt filter is an error and not everything. */
+const noQuery = z.strictObject({})
+
 const served = new WeakMap<Router, Route[]>()
 /** The contracts registered on a router so far. */
 export const routesOf = (router: Router): readonly Route[] => served.get(router) ?? []
@@ -66,7 +69,7 @@ export function serve<const R extends Route>(router: Router, context: AppContext
       checkText([req.params, req.query, received.body])
       const call = {
         params: parsePart(route.params, req.params, 'address'),
-        query: parsePart(route.query, req.query, 'query'),
+        query: route.query ? parsePart(route.query, req.query, 'query') : void parsePart(noQuery, req.query, 'query'),
         body: parsePart(route.body, received.body, 'request'),
         ...granted, file: received.file, req, res,
       }

@@ -1,3 +1,5 @@
+import { and, eq } from 'drizzle-orm'
+import { auditEntries } from '#db/schema/auditEntries.ts'
 import { afterAll, beforeAll, expect, it } from 'vitest'
 import { type TestApp, password, testApp } from '../../support/testApp.ts'
 
@@ -18,4 +20,32 @@ it('answers an unknown address and a wrong password alike', async () => {
   const wrong = await t.browser().post('/api/sign-in').send({ email: t.owner.email, password: 'not this one at all' }).expect(401)
   expect({ ...unknown.body.error, requestId: '' }).toEqual({ ...wrong.body.error, requestId: '' })
   expect(unknown.body.error.code).toBe('sign-in.wrong')
+})
+
+it('refuses a second account for one address, also when two are made at once', async () => {
+  const make = () => t.browser().post('/api/sign-up').send({ name: 'Bo', email: 'bo@example.org', password: 'copper kettles hum at dusk' })
+  const answers = await Promise.all([make(), make()])
+  expect(answers.map(({ status }) => status).toSorted()).toEqual([201, 409])
+  expect((await make().expect(409)).body.error.code).toBe('sign-up.taken')
+})
+
+it('takes the address in any case', async () => {
+  await t.browser().post('/api/sign-in').send({ email: ` ${t.owner.email.toUpperCase()}`, password }).expect(200)
+})
+
+it('notes sign-ins and failures without the address', async () => {
+  const { userId, email } = await t.person('Cleo')
+  await t.browser().post('/api/sign-in').send({ email, password: 'wrong again, sorry' }).expect(401)
+  const failed = await t.db.select().from(auditEntries).where(and(eq(auditEntries.userId, userId), eq(auditEntries.event, 'sign-in.failed')))
+  const done = await t.db.select().from(auditEntries).where(and(eq(auditEntries.userId, userId), eq(auditEntries.event, 'sign-in')))
+  expect([failed.length, done.length]).toEqual([1, 1])
+  expect(JSON.stringify([failed, done])).not.toContain(email)
+})
+
+it('changes name and units, and leaves alone what is not named', async () => {
+  const cleo = await t.person('Dora')
+  expect((await cleo.patch('/api/me').send({ units: 'inch' }).expect(200)).body).toMatchObject({ name: 'Dora', units: 'inch' })
+  expect((await cleo.patch('/api/me').send({ name: 'Dora Fenn' }).expect(200)).body).toMatchObject({ name: 'Dora Fenn', units: 'inch' })
+  expect((await cleo.get('/api/me').expect(200)).body).toMatchObject({ name: 'Dora Fenn', units: 'inch' })
+  await cleo.patch('/api/me').send({ email: 'other@example.org' }).expect(400)
 })

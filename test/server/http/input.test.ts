@@ -48,6 +48,11 @@ describe('a body', () => {
   })
 })
 
+it('takes no query where the contract names none', async () => {
+  const { body } = await t.owner.get(`${wearers}?nmae=Ida`).expect(400)
+  expect(body.error.details).toHaveProperty('nmae')
+})
+
 describe('text', () => {
   it('is kept in composed form, trimmed, with every script as typed', async () => {
     const { body } = await t.owner.post(wearers).send({ name: '  Zoe\u0308 李 🧵 ', note: '<b>"; drop table wearers; --' }).expect(201)

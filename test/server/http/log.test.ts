@@ -14,7 +14,7 @@ describe('the log', () => {
   it('has one line a request with id, person, route, status and time', async () => {
     const { headers } = await t.owner.get(`/api/studios/${t.studioId}`).expect(200)
     expect(entries()).toEqual([expect.objectContaining({
-      req: { id: headers['x-request-id'], method: 'GET' }, res: { status: 200 }, route: '/api/studios/:studioId', userId: t.owner.userId, responseTime: expect.any(Number),
+      requestId: headers['x-request-id'], method: 'GET', status: 200, route: '/api/studios/:studioId', userId: t.owner.userId, tookMs: expect.any(Number),
     })])
   })
   it('holds no cookie, password, address, token or id of a path', async () => {
