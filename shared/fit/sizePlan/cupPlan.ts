@@ -51,7 +51,8 @@ function ruleText({ chart }: PlanInput, rule: HighBustRule): string {
   return bodyColumn(chart, 'high-bust').length ? 'The size is the one whose high bust is nearest to this one.' : 'The size is the one whose bust, less the drafted difference, is nearest to this high bust.'
 }
 const draftedText = (bodyMm: number, draftedMm: number, assumed: boolean) =>
-  `Full bust and high bust are {mm:${bodyMm}} apart; the pattern is drafted for {mm:${draftedMm}}${assumed ? ', as most are where they do not say' : ''}.`
+  `The full bust is ${overHighBust(bodyMm)}; the pattern is drafted for ${draftedMm < 0 ? overHighBust(draftedMm) : `{mm:${draftedMm}}`}${assumed ? ', as most are where they do not say' : ''}.`
+const overHighBust = (mm: number) => (mm < 0 ? `{mm:${-mm}} less than the high bust` : `{mm:${mm}} more than the high bust`)
 function changeText({ wholeMm, halfFrontMm, advice }: BustAddition): string {
   if (advice === 'leave') return 'That is near enough to leave the bust as it is.'
   if (advice === 'take-away') return `Take {mm:${-wholeMm}} out of the front over the bust, {mm:${-halfFrontMm}} on each half.`
