@@ -1,6 +1,10 @@
 /**
  * The words of the rules module: what a fitting is, and what the module answers.
  * Everything is plain data; all lengths are millimetres.
+ *
+ * Texts the module answers with carry their amounts as tokens, since only the reader knows whether they read centimetres or inches:
+ * `{mm:16}` is a length, `{+mm:-16}` a change with its sign. `fillAmounts` in `amountText.ts` turns them into words. They stand in
+ * `because`, `steps[].text`, companions, notes, `limits.text`, `response.text`, predictions, conflicts, `unexplained` and `missing`.
  */
 
 export const garmentKinds = ['skirt', 'trousers', 'bodice', 'shirt', 'dress', 'jacket', 'coat'] as const
@@ -108,6 +112,8 @@ export type FitInput = {
   answers: Readonly<Record<string, 'yes' | 'no'>>
   ledger: readonly LedgerEntry[]
   cloth?: SampleCloth
+  /** paper amounts are whole millimetres, or sixteenths of an inch for 'inch'; left out: 'cm' */
+  unit?: 'cm' | 'inch'
 }
 
 export type Check = {
