@@ -34,7 +34,8 @@ export const sessionQueries = (db: Queryable) => ({
       .where(and(sql`${sessions.sid} = ${sid}`, sql`${sessions.sess}->>'rotate' is not null`)).returning({ sid: sessions.sid })
     return rows.length === 1
   },
-  async removeExpired(before: Date): Promise<number> {
-    return (await db.delete(sessions).where(lt(sessions.expire, before))).rowCount ?? 0
+  /** By the database's own clock: the column has no time zone, so a time from here would be read in another. */
+  async removeExpired(): Promise<number> {
+    return (await db.delete(sessions).where(lt(sessions.expire, sql`now()`))).rowCount ?? 0
   },
 })
