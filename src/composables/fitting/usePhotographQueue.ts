@@ -79,8 +79,8 @@ export function usePhotographQueue({ send, filled, onSent, pending, explain }: O
     } catch (failure) {
       if (!abort.signal.aborted) {
         const { message, again } = explain(failure)
-        const at = Math.round((find(item.key)?.part ?? 0) * 100)
-        set(item.key, { state: again ? 'failed' : 'refused', message: again ? `${message} ${at > 0 && at < 100 ? `It stopped at ${at} %; the` : 'The'} photograph is still on this device.` : message })
+        // The uploader says how far it got and that the photograph is still here.
+        set(item.key, { state: again ? 'failed' : 'refused', message })
         if (!again) void pending.drop(item.key)
       }
     } finally {
