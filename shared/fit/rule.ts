@@ -46,8 +46,9 @@ export type SignPattern = {
   because: string
   /**
    * Ways of measuring this sign that give the rule's whole amount, each with the factor that makes the cloth into that whole
-   * amount. A fold's depth is doubled before, so `{ 'fold-depth': 1 }` is right for a plain fold. A kind left out gives no amount
-   * (a hem that rises by 20 does not say how much bust width is missing).
+   * amount. A fold's depth is doubled before, so `{ 'fold-depth': 1 }` is right for a plain fold. `cloth`, `gap` and `fold-depth`
+   * are all cloth and stand in for each other; `shift` is never taken unless it stands here (a hem that rises by 20 does not say how
+   * much bust width is missing). Without `amounts` the sign gives no amount at all.
    */
   amounts?: Partial<Record<AmountKind, number>>
   /** kinds in `amounts` that people measure on each side apart: where the side is 'both', the whole is twice that */

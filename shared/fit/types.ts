@@ -46,7 +46,7 @@ export type Side = (typeof sides)[number]
 export const directions = ['horizontal', 'vertical', 'diagonal', 'radiating'] as const
 export type Direction = (typeof directions)[number]
 
-/** Where a drag line points or is caught, or which way a seam or point is off. */
+/** Where a drag line points or is caught, or which way a seam swings; for `off-place` the way it has to go: a dart point below the bust point is 'up'. */
 export const targets = [
   'front', 'back', 'up', 'down', 'in', 'out', 'neck', 'shoulder-tip', 'bust', 'underarm', 'armhole', 'shoulder-blade',
   'side-seam', 'waist', 'abdomen', 'hip', 'seat', 'crotch', 'thigh', 'knee', 'elbow', 'hem',
