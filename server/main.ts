@@ -21,7 +21,10 @@ const graceMs = 9000
 const slowestUploadMs = 7 * 60_000
 
 export type RunningServer = {
+  /** where people reach it */
   url: string
+  /** where this process listens */
+  port: number
   /** Takes no new requests, lets those under way finish, closes everything; at most ten seconds. */
   stop: () => Promise<void>
 }
@@ -63,7 +66,7 @@ export async function startServer(settings: Settings, given: Partial<Pick<AppCon
     await Promise.race([scheduler.stop().then(() => pool.end()), late])
     logger.info('stopped')
   }
-  return { url, stop: () => (stopping ??= stop()) }
+  return { url, port, stop: () => (stopping ??= stop()) }
 }
 
 /** Stops on the signals of a terminal and of a service manager, and ends the process. */

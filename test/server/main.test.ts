@@ -1,11 +1,13 @@
-import { type ChildProcess, spawn } from 'node:child_process'
+import { mkdtempSync, rmSync } from 'node:fs'
 import http from 'node:http'
-import { fileURLToPath } from 'node:url'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { startServer } from '#server/main.ts'
 import { readSettings } from '#server/settings.ts'
 import { type FreshDatabase, freshDatabase } from '../support/freshDatabase.ts'
 import { memoryStore } from '../support/memoryStore.ts'
+import { serverProcess } from '../support/serverProcess.ts'
 
 let database: FreshDatabase
 beforeAll(async () => { database = await freshDatabase() })
@@ -52,29 +54,10 @@ describe('the server', () => {
   })
 })
 
-describe('a process', () => {
-  it('ends by itself, with success, when it is asked to terminate', async () => {
-    const child = run(`
-      import { startServer, stopOnSignals } from '#server/main.ts'
-      import { readSettings } from '#server/settings.ts'
-      import { memoryStore } from './test/support/memoryStore.ts'
-      const server = await startServer(readSettings(process.env, 'local'), { storage: memoryStore() })
-      stopOnSignals(server)
-      console.log('listening')
-    `)
-    await said(child, 'listening')
-    const ended = new Promise((resolve) => { child.once('exit', (code, signal) => resolve({ code, signal })) })
-    child.kill('SIGTERM')
-    expect(await ended).toEqual({ code: 0, signal: null })
-  })
-})
-
-function run(script: string): ChildProcess {
-  return spawn(process.execPath, ['--import', 'tsx', '--input-type=module', '-e', script], {
-    cwd: fileURLToPath(new URL('../..', import.meta.url)), env: { ...process.env, ...env() }, stdio: ['ignore', 'pipe', 'inherit'],
-  })
-}
-const said = (child: ChildProcess, word: string) => new Promise<void>((resolve, reject) => {
-  child.stdout!.on('data', (data: Buffer) => { if (data.toString().includes(word)) resolve() })
-  child.once('exit', (code) => reject(new Error(`ended with ${code} before it said ${word}`)))
+it('ends as a process, with success, when it is asked to terminate', async () => {
+  const folder = mkdtempSync(join(tmpdir(), 'photographs-'))
+  const { child, ended } = await serverProcess({ ...env(), PHOTO_STORAGE: `disk:${folder}` })
+  child.kill('SIGTERM')
+  expect(await ended).toEqual({ code: 0, signal: null })
+  rmSync(folder, { recursive: true })
 })
