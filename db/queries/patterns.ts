@@ -1,5 +1,6 @@
 import { and, eq, getTableColumns, sql } from 'drizzle-orm'
 import { type Queryable } from '#db/client.ts'
+import { prepared } from '#db/prepared.ts'
 import { type PatternRow, patterns } from '#db/schema/patterns.ts'
 import { projects } from '#db/schema/projects.ts'
 
@@ -12,12 +13,14 @@ const columns = {
 }
 const inStudio = (studioId: string, id: string) => and(eq(patterns.studioId, studioId), eq(patterns.id, id))
 
+const inStudioById = prepared((db) => db.select(columns).from(patterns).where(and(eq(patterns.studioId, sql.placeholder('studioId')), eq(patterns.id, sql.placeholder('id')))).prepare('pattern'))
+
 export const patternQueries = (db: Queryable) => ({
   async list(studioId: string): Promise<PatternWithCount[]> {
     return db.select(columns).from(patterns).where(eq(patterns.studioId, studioId)).orderBy(patterns.name, patterns.id)
   },
   async find(studioId: string, id: string): Promise<PatternWithCount | null> {
-    const [row] = await db.select(columns).from(patterns).where(inStudio(studioId, id))
+    const [row] = await inStudioById(db).execute({ studioId, id })
     return row ?? null
   },
   async insert(pattern: typeof patterns.$inferInsert): Promise<PatternRow> {
