@@ -101,8 +101,15 @@ function chartWarnings(input: PlanInput): string[] {
   const warnings: string[] = []
   if (!chart.some((row) => row.finished && Object.keys(row.finished).length)) warnings.push('The pattern gives no finished measurements, so the ease cannot be told. Measure the paper across at bust, waist or hip, and type it in.')
   if (isKnit(input) && options.stretchPercent === undefined) warnings.push('The stretch of the cloth is not measured. Fold it, mark {mm:100} away from the edge, and see how far that goes easily and comes back from.')
-  if (hasFeature(garment, 'children')) warnings.push('Children are sized by their measurements and their height, never by age.')
+  if (hasFeature(garment, 'children')) warnings.push(childrenText(input))
   return warnings
+}
+
+/** Children's lengths go by height, widths by their own girths, nothing by age. Common practice. */
+function childrenText({ body, chart }: PlanInput): string {
+  const [height, column] = [bodyValue(body, 'height'), bodyColumn(chart, 'height')]
+  const start = 'Children are sized by their measurements and their height, never by age.'
+  return height !== null && column.length ? `${start} By height, trace the lengths of size ${nearestSize(height, column, 'larger').label}; the widths keep their own size.` : start
 }
 
 /** What was traced is drafted for the chart's body of each level's own size; everything else follows the size that leads. */

@@ -84,11 +84,11 @@ export const measurementTable = [
     how: 'Straight across from one fullest point of the bust to the other.', tape: straight('front', [85, 112], [115, 112]), plausible: ours(130, 300),
   },
   {
-    code: 'front-waist-length', standardName: 'neck shoulder over breast point to waist', name: 'Front waist length', aliases: ['front waist', 'front length', 'front bodice length', 'neck to waist front'], group: 'trunk', kind: 'length', paired: true, toleranceMm: small,
+    code: 'front-waist-length', standardName: 'neck shoulder over breast point to waist', name: 'Front waist length', aliases: ['front waist', 'front bodice length', 'neck to waist front'], group: 'trunk', kind: 'length', paired: true, toleranceMm: small,
     how: 'From the side of the neck base, over the fullest point of the bust, down to the tape tied at the waist.', tape: straight('front', [110, 60], [115, 112], [113, 148]), plausible: ours(350, 560),
   },
   {
-    code: 'back-waist-length', standardName: 'back waist length', name: 'Back waist length', aliases: ['back waist', 'nape to waist', 'back length', 'neck to waist', 'neck to waist back', 'back neck to waist', 'center back length', 'centre back length'], group: 'trunk', kind: 'length', paired: false, toleranceMm: small,
+    code: 'back-waist-length', standardName: 'back waist length', name: 'Back waist length', aliases: ['back waist', 'nape to waist', 'neck to waist', 'neck to waist back', 'back neck to waist'], group: 'trunk', kind: 'length', paired: false, toleranceMm: small,
     how: 'Someone else measures: from the prominent bone at the back of the neck, straight down to the tape tied at the waist.',
     tape: straight('back', [100, 57], [100, 147]), plausible: survey([384, 470], [433, 524], 'taken there to navel level, which lies lower'),
   },
@@ -189,7 +189,7 @@ export const measurementTable = [
     how: 'Along the side, from the waist tape over the hip to the floor, in the shoes worn with the garment if they matter.', tape: straight('front', [127, 147], [138, 196], [128, 384]), plausible: ours(850, 1250),
   },
   {
-    code: 'waist-to-knee', standardName: null, name: 'Waist to knee', aliases: ['waist to knee', 'skirt length'], group: 'leg', kind: 'length', paired: false, toleranceMm: large,
+    code: 'waist-to-knee', standardName: null, name: 'Waist to knee', aliases: ['waist to knee'], group: 'leg', kind: 'length', paired: false, toleranceMm: large,
     how: 'Along the side, from the waist tape to the middle of the knee.', tape: straight('front', [127, 147], [138, 196], [130, 286]), plausible: ours(480, 720),
   },
   {

@@ -4,7 +4,7 @@ import { bodyColumn } from '../../sizes/sizeChart.ts'
 import { easeBand } from '../../sizes/wearingEase.ts'
 import { tidyMm } from '../../units/unit.ts'
 import { highBustColumn, ruleOf } from './cupPlan.ts'
-import { isKnit, levelWord } from './garmentZones.ts'
+import { isKnit, isUpper, levelWord } from './garmentZones.ts'
 import { draftedOf, tieOf } from './governing.ts'
 import { nearestSize, type Column, type Nearest } from './nearestSize.ts'
 import { type OffChart, type PlanInput, type ZonePlan, type ZoneSize } from './types.ts'
@@ -123,7 +123,7 @@ function readsAs(againstMm: number | null): string {
   return againstMm < 0 ? `{mm:${-againstMm}} under` : `{mm:${againstMm}} over`
 }
 
-const easeWarningStart = ({ code }: ZonePlan) => `The ${levelWord(code)} would`
+const easeWarningStart = ({ code }: Pick<ZonePlan, 'code'>) => `The ${levelWord(code)} would`
 function easeWarnings(input: PlanInput, zone: ZonePlan): string[] {
   const { easeMm, minimumMm, designEaseMm, bodyMm } = zone
   if (easeMm === null || bodyMm === null) return []
@@ -135,10 +135,18 @@ function easeWarnings(input: PlanInput, zone: ZonePlan): string[] {
     if (minimumMm !== null && easeMm < minimumMm) return [`${start} be {mm:${-easeMm}} smaller than the body, more than half of what the cloth can span. Check that it recovers, and prove it on a sample of the same knit.`]
     return []
   }
-  if (minimumMm === null || easeMm >= minimumMm - 0.5) return []
+  const seated = seatedWarning(input, zone)
+  if (minimumMm === null || easeMm >= minimumMm - 0.5) return seated ? [seated] : []
   const meant = designEaseMm === null || designEaseMm >= minimumMm ? '' : designEaseMm < 0 ? `{mm:${-designEaseMm}} less than the body` : `{mm:${designEaseMm}}`
   const drafted = meant && ` The pattern itself means ${meant}.`
   const have = easeMm < 0 ? `be {mm:${-easeMm}} smaller than the body` : `have {mm:${easeMm}} of ease`
   return [`${start} ${have}; {mm:${minimumMm}} is the least to wear in cloth that does not stretch.${drafted}`]
+}
+
+/** Waist and hip grow in sitting; a skirt or trousers of cloth that does not stretch must take that too. Common practice. */
+function seatedWarning({ body, garment }: PlanInput, { code, cut }: ZonePlan): string | null {
+  const seatedMm = body[`${code}-seated`]
+  if (!seatedMm || !cut?.finishedMm || isUpper(garment.kind) || cut.finishedMm >= seatedMm) return null
+  return `${easeWarningStart({ code })} be {mm:${tidyMm(seatedMm - cut.finishedMm)}} short in sitting. Take a larger size there, or let it out.`
 }
 const capital = (text: string) => text[0]!.toUpperCase() + text.slice(1)

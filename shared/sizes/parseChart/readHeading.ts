@@ -19,7 +19,8 @@ export function headingUnit(text: string): Unit | 'mm' | null {
   const lower = text.toLowerCase()
   if (/\b(mm|millimet(er|re)s?)\b/.test(lower)) return 'mm'
   if (/\b(cms?|centimet(er|re)s?)\b/.test(lower)) return 'cm'
-  return /\b(in|ins|inch|inches)\b|["″]/.test(lower) ? 'inch' : null
+  // "in" is a unit at the end or in brackets, and a plain word elsewhere.
+  return /\b(ins|inch|inches)\b|["″]|\bin\.?\s*[)\]]?\s*$/.test(lower) ? 'inch' : null
 }
 export const isFinished = (text: string): boolean => /\b(finished|garment)\b/i.test(text)
 export const isSizeWord = (text: string): boolean => sizeWords.has(key(stripped(text)))

@@ -1,3 +1,4 @@
+import { fillAmounts } from '#shared/fit/amountText.ts'
 import { sizePlan } from '#shared/fit/sizePlan.ts'
 import { garmentFeatures, garmentKinds, sleeveKinds, waistKinds } from '#shared/fit/types.ts'
 import { measurementTable } from '#shared/measurements/measurementTable.ts'
@@ -158,6 +159,11 @@ describe('the ease that results', () => {
     expect(zone(plan, 'hip')).toMatchObject({ easeMm: null, band: null, againstDesignMm: -10, reads: '{mm:10} under' })
     expect(plan.warnings.join(' ')).toMatch(/no finished measurements/)
   })
+  it('warns where a skirt that does not stretch is too small to sit in (common practice)', () => {
+    const body = { hip: 960, 'hip-seated': 1035 }
+    expect(zone(sizePlan(body, withEase({ hip: 60 }), { kind: 'skirt' }), 'hip').warnings).toEqual([expect.stringMatching(/\{mm:15\} short in sitting/)])
+    expect(zone(sizePlan(body, withEase({ hip: 80 }), { kind: 'skirt' }), 'hip').warnings).toEqual([])
+  })
   it('refuses a knit smaller than its stretch can span, and warns from half of that', () => {
     const chart = (finished: number) => [{ label: 'M', body: { bust: 914.4 }, finished: { bust: finished } }]
     const knit = { kind: 'bodice', features: ['knit'] } as const
@@ -206,6 +212,13 @@ describe('lengths', () => {
   })
 })
 
+it('takes a child’s lengths by height, and nothing by age (common practice)', () => {
+  const chart = ['110', '116', '122'].map((label, i) => ({ label, body: { height: 1100 + 60 * i, chest: 580 + 20 * i } }))
+  const plan = sizePlan({ height: 1215, chest: 585 }, chart, { kind: 'bodice', features: ['children'] })
+  expect(plan.label).toBe('110')
+  expect(plan.warnings.join(' ')).toMatch(/never by age\. By height, trace the lengths of size 122/)
+})
+
 describe('what is missing', () => {
   it('never asks a skirt for the bust, whatever chart, body and features', () => {
     fc.assert(fc.property(fc.constantFrom(...waistKinds), fc.subarray([...garmentFeatures]), fc.subarray(['waist', 'hip', 'abdomen', 'bust', 'high-bust']), (waist, features, taken) => {
@@ -240,5 +253,6 @@ it('answers any body, chart and garment with sizes of the chart and sentences wi
       if (one.t !== null) { expect(one.t).toBeGreaterThanOrEqual(0); expect(one.t).toBeLessThanOrEqual(1) }
     }
     expect(JSON.stringify(plan)).not.toMatch(/NaN|undefined|Infinity|\{mm:-/)
+    expect(fillAmounts(JSON.stringify(plan), String)).not.toMatch(/mm:/)
   }), { numRuns: 300 })
 })

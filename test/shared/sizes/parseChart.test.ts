@@ -39,6 +39,11 @@ describe('a chart pasted from a spreadsheet', () => {
     expect(parseChart(tab(['Size', '14'], ['Bust', '36"']), 'cm').chart[0]!.body).toEqual({ bust: 914.4 })
     expect(parseChart(tab(['Size', 'bust (mm)'], ['14', '914']), 'inch').chart[0]!.body).toEqual({ bust: 914 })
   })
+  it('takes "in" for inches at the end of a heading only', () => {
+    expect(parseChart(`Bodies in this class\n${tab(['Size', 'Bust, in'], ['14', '36'])}`, 'cm').chart[0]!.body).toEqual({ bust: 914.4 })
+    expect(parseChart(`Bodies in this class\n${tab(['Size', 'Bust'], ['14', '92'])}`, 'cm').chart[0]!.body).toEqual({ bust: 920 })
+  })
+  it('does not take the length of a garment for one of the body', () => expect(stops(tab(['Size', 'Hip', 'Skirt length'], ['14', '96', '60']))[0]!.message).toMatch(/"Skirt length"/))
   it('reads a chart printed in both units once, in the one asked for', () => {
     const both = tab(['Size', '14'], ['Bust (in)', '36'], ['Bust (cm)', '92'])
     expect(parseChart(both, 'cm')).toMatchObject({ chart: [{ body: { bust: 920 } }] })
