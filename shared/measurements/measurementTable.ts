@@ -64,7 +64,7 @@ export const measurementTable = [
   {
     code: 'high-bust', standardName: null, name: 'High bust', aliases: ['upper bust', 'above bust'], group: 'trunk', kind: 'girth', paired: false, toleranceMm: large,
     how: 'Close under the arms and above the fullness of the bust, across the widest part of the back. The tape slopes up at the back; pull it snug.',
-    tape: ring('front', 67, 133, 102, -6, 4), plausible: ours(700, 1250),
+    tape: ring('front', 67, 133, 102, 4, 8), plausible: ours(700, 1250),
   },
   {
     code: 'chest', standardName: 'chest girth', name: 'Chest', aliases: ['chest girth', 'chest circumference'], group: 'trunk', kind: 'girth', paired: false, toleranceMm: large,
@@ -73,7 +73,7 @@ export const measurementTable = [
   },
   {
     code: 'underbust', standardName: 'underbust girth', name: 'Underbust', aliases: ['under bust', 'rib', 'ribcage', 'rib cage'], group: 'trunk', kind: 'girth', paired: false, toleranceMm: large,
-    how: 'Level round the ribs, directly under the bust.', tape: ring('front', 69, 131, 124, 7), plausible: ours(620, 1200),
+    how: 'Level round the ribs, directly under the bust.', tape: ring('front', 70, 130, 124, 7), plausible: ours(620, 1200),
   },
   {
     code: 'bust-depth', standardName: 'neck shoulder to breast point', name: 'Bust depth', aliases: ['shoulder to bust', 'bust point depth', 'apex depth'], group: 'trunk', kind: 'length', paired: true, toleranceMm: small,
@@ -141,11 +141,11 @@ export const measurementTable = [
   },
   {
     code: 'arm-length', standardName: 'arm length', name: 'Arm length', aliases: ['sleeve', 'sleeve length', 'shoulder to wrist'], group: 'arm', kind: 'length', paired: true, toleranceMm: small,
-    how: 'From the bone where the arm begins, over the bent elbow, to the wrist bone.', tape: straight('front', [135, 71], [148, 136], [158, 190]), plausible: survey([497, 594], [545, 645]),
+    how: 'From the bone where the arm begins, over the bent elbow, to the wrist bone.', tape: straight('front', [134, 71], [143, 104], [148, 136], [158, 190]), plausible: survey([497, 594], [545, 645]),
   },
   {
     code: 'crotch-depth', standardName: 'body rise', name: 'Crotch depth', aliases: ['rise', 'body rise', 'depth of crotch'], group: 'leg', kind: 'length', paired: false, toleranceMm: small,
-    how: 'Sitting upright on a hard flat chair: along the side, from the tape at the waist to the seat.', tape: straight('side', [112, 147], [120, 190], [110, 214]), plausible: ours(200, 380),
+    how: 'Sitting upright on a hard flat chair: along the side, from the tape at the waist to the seat.', tape: { view: 'side', path: 'M100 147L100 214M84 214L117 214' }, plausible: ours(200, 380),
   },
   {
     code: 'crotch-length', standardName: 'total crotch length', name: 'Crotch length', aliases: ['crotch length', 'total crotch', 'trunk rise'], group: 'leg', kind: 'length', paired: false, toleranceMm: large,
@@ -186,11 +186,11 @@ export const measurementTable = [
   },
   {
     code: 'outside-leg', standardName: 'outside leg length', name: 'Side length', aliases: ['outseam', 'outside leg', 'waist to floor', 'side length', 'outside leg length'], group: 'leg', kind: 'length', paired: true, toleranceMm: large,
-    how: 'Along the side, from the waist tape over the hip to the floor, in the shoes worn with the garment if they matter.', tape: straight('front', [127, 147], [138, 196], [128, 384]), plausible: ours(850, 1250),
+    how: 'Along the side, from the waist tape over the hip to the floor, in the shoes worn with the garment if they matter.', tape: straight('front', [125.5, 147], [130, 166], [135.5, 200], [133, 240], [126, 286], [125, 314], [117, 366], [117, 384]), plausible: ours(850, 1250),
   },
   {
     code: 'waist-to-knee', standardName: null, name: 'Waist to knee', aliases: ['waist to knee'], group: 'leg', kind: 'length', paired: false, toleranceMm: large,
-    how: 'Along the side, from the waist tape to the middle of the knee.', tape: straight('front', [127, 147], [138, 196], [130, 286]), plausible: ours(480, 720),
+    how: 'Along the side, from the waist tape to the middle of the knee.', tape: straight('front', [125.5, 147], [130, 166], [135.5, 200], [133, 240], [126, 286]), plausible: ours(480, 720),
   },
   {
     code: 'foot', standardName: 'foot length', name: 'Foot', aliases: ['foot length'], group: 'leg', kind: 'length', paired: true, toleranceMm: small,
