@@ -53,7 +53,7 @@ export function redrawPiece(shape: PieceShape, operation: Operation, step: Pick<
   const nextPoints = runs.flatMap(({ edge, points }) => points.map((p, i) => move(p, edge.name, i / samples)))
   const closed = (points: readonly Pt[]) => `M${points.map(([x, y]) => `${round(x)} ${round(y)}`).join('L')}Z`
   const legs = (apex: Pt, [a, b]: readonly [Pt, Pt]) => `M${round(a[0])} ${round(a[1])}L${round(apex[0])} ${round(apex[1])}L${round(b[0])} ${round(b[1])}`
-  const free: Move = (p) => move(p, '', 0)
+  const free = (p: Pt): Pt => move(p, '', 0)
   return {
     old: closed(oldPoints), next: closed(nextPoints), slashes: marks.slashes ?? [], hinges: marks.hinges ?? [], arrows: marks.arrows ?? [], label: marks.label ?? shape.edges[0]!.points[0]!,
     dartsOld: shape.darts.map(({ apex, feet }) => legs(apex, feet)),

@@ -15,15 +15,15 @@ import { useMarking } from './useMarking.ts'
 import { usePhotographs } from './usePhotographs.ts'
 import { changesToCarry, useSample } from './useSample.ts'
 
-type Options = { project: () => Project; number: number; me: () => { id: string; name: string }; format: Format; say: (text: string) => void }
+type Options = { project: () => Project; number: number; me: () => { id: string; name: string }; format: Format; say: (text: string) => void; tell: (text: string, action?: { text: string; run: () => void }) => void }
 
 /** Everything the fitting screen works with, for desk and phone alike: what is selected, what is edited, what one may do. */
-export function createFitting({ project, number, me, format, say }: Options) {
+export function createFitting({ project, number, me, format, say, tell }: Options) {
   const session = useFitting(project().id, number, me)
   const marking = useMarking(session)
   const decisions = useDecisions(session)
   const sampleWork = useSample(session)
-  const photos = usePhotographs(session, say)
+  const photos = usePhotographs(session, say, () => tell('Photograph removed.', { text: 'Undo', run: () => void go('undo') }))
 
   const can = computed(() => {
     const { role } = project()
@@ -101,7 +101,7 @@ export function createFitting({ project, number, me, format, say }: Options) {
     if (!one || !await marking.remove(id)) return
     if (editing.value && session.notes.idOf(editing.value.id) === one.id) editing.value = null
     if (selectedId.value === one.id) selected.value = null
-    say(`Observation ${one.number} removed. Undo brings it back.`)
+    tell(`Observation ${one.number} removed.`, { text: 'Undo', run: () => void go('undo') })
   }
   function adjustAmount(byMm: number) {
     const one = current.value
@@ -124,8 +124,11 @@ export function createFitting({ project, number, me, format, say }: Options) {
     photographs: photos.photographs.value.length, open: session.observations.value.filter(({ state }) => state === 'noted').length, toCarry: changesToCarry(session.fitting.value?.changes ?? []),
   }))
 
+  /** in the words of the visible save state: what is kept on the device is not saved yet */
+  const saveWord = computed(() => { const { value } = session.notes.saveState; return value === 'kept' ? 'failed' : value })
+
   return {
-    project, number, session, marking, decisions, sampleWork, photos, can, selectedId, tool, editing, edited, showLetBe, changes, cards, notches, current, boardMarks, counts,
+    project, number, saveWord, session, marking, decisions, sampleWork, photos, can, selectedId, tool, editing, edited, showLetBe, changes, cards, notches, current, boardMarks, counts,
     select, step, edit, leaveEditor, place, writeDown, remove, adjustAmount, undo: () => go('undo'), redo: () => go('redo'), isNewest, stepCounts, say, format,
     base: `/p/${project().id}/samples/${number}`,
   }

@@ -9,7 +9,7 @@ import { usePhotographQueue } from './usePhotographQueue.ts'
 const order: readonly View[] = ['front', 'back', 'left', 'right', 'detail']
 
 /** The photographs of a sample: which one is on the board, what is on its way, views and removal. */
-export function usePhotographs(session: FittingSession, say: (text: string) => void) {
+export function usePhotographs(session: FittingSession, say: (text: string) => void, onRemoved: () => void) {
   const { fitting, api, act, history, patch, refreshSoon } = session
   const photographs = computed(() => [...(fitting.value?.photographs ?? [])].sort((a, b) => order.indexOf(a.view) - order.indexOf(b.view) || a.createdAt.localeCompare(b.createdAt)))
   const chosenId = ref<string | null>(null)
@@ -56,8 +56,8 @@ export function usePhotographs(session: FittingSession, say: (text: string) => v
   async function remove(photograph: Photograph) {
     const gone = async () => { await api.removePhotograph(photograph.id); drop(photograph.id); refreshSoon(); return true }
     if (!await act(`photograph:${photograph.id}`, gone)) return false
-    say('Photograph removed. Undo brings it back.')
     history.note({ label: 'Remove the photograph', undo: async () => { put(await api.restorePhotograph(photograph.id)); refreshSoon() }, redo: async () => { await gone() } })
+    onRemoved()
     return true
   }
 
