@@ -1,0 +1,109 @@
+import { areRivals, type Candidate } from './candidates.ts'
+
+/** What one more cause costs: more than a fair sign and less than a strong one, so that a cause is not brought in for one vague sign others explain. */
+const causeCost = 6
+/** What leaving an observation unexplained costs. With the cost of a cause: a lone fair sign is enough, a lone slight one is not. */
+const openCost = 3
+/** Two causes are tried together up to this many candidates; a fitting of six observations seldom has more worth trying. */
+const mostForPairs = 40
+
+export type Cover = {
+  chosen: readonly Candidate[]
+  /** column → the chosen candidate that explains it best */
+  explainedBy: ReadonlyMap<string, Candidate>
+}
+
+/**
+ * The fewest causes that explain what was seen: the set of candidates with the greatest sum of what each column is explained by,
+ * less the cost of each cause. Begins with nothing and goes on adding (one, or two together), exchanging and dropping while that
+ * helps. Equal sets are told apart by the catalogue's order, never by the order of the observations.
+ */
+export function coverObservations(candidates: readonly Candidate[]): Cover {
+  const table = tabulate([...candidates].sort((a, b) => ownPoints(b) - ownPoints(a) || a.place - b.place || (a.side < b.side ? -1 : 1)))
+  let best: readonly number[] = []
+  let bestValue = 0
+  for (let improved = true; improved;) {
+    improved = false
+    for (const next of neighbours(best, table.list.length)) {
+      const pruned = prune(next, table)
+      const value = valueOf(pruned, table)
+      if (value > bestValue) [best, bestValue, improved] = [pruned, value, true]
+    }
+  }
+  const by = explainers(best, table)
+  const explainedBy = new Map<string, Candidate>()
+  table.columns.forEach((column, i) => { if (by[i]! >= 0) explainedBy.set(column, table.list[by[i]!]!) })
+  return { chosen: best.map((i) => table.list[i]!), explainedBy }
+}
+
+/** All that speaks for a cause less all that speaks against it, whatever else is chosen. */
+export const ownPoints = ({ columns, bonus }: Candidate): number => [...columns.values()].reduce((sum, value) => sum + value, bonus)
+
+/** The candidates, strongest first, as rows of numbers: sets are weighed some thousand times. */
+type Table = { list: readonly Candidate[]; columns: readonly string[]; isSeen: readonly boolean[]; rows: readonly Int32Array[]; bonus: readonly number[] }
+
+function tabulate(list: readonly Candidate[]): Table {
+  const columns = [...new Set(list.flatMap((candidate) => [...candidate.columns.keys()]))].sort()
+  return {
+    list, columns, isSeen: columns.map((column) => column.startsWith('seen ')), bonus: list.map((candidate) => candidate.bonus),
+    rows: list.map((candidate) => Int32Array.from(columns, (column) => candidate.columns.get(column) ?? 0)),
+  }
+}
+
+function* neighbours(set: readonly number[], count: number): Generator<readonly number[]> {
+  const outside = Array.from({ length: count }, (_, i) => i).filter((i) => !set.includes(i))
+  for (const one of outside) {
+    yield [...set, one]
+    for (const member of set) yield [...set.filter((other) => other !== member), one]
+  }
+  for (const member of set) yield set.filter((other) => other !== member)
+  if (outside.length <= mostForPairs) for (let a = 0; a < outside.length; a++) for (let b = a + 1; b < outside.length; b++) yield [...set, outside[a]!, outside[b]!]
+}
+
+/** For each column the member that explains it best, −1 for none; of equals the one with more behind it, which stands first. */
+function explainers(set: readonly number[], { columns, rows }: Table): Int32Array {
+  const by = new Int32Array(columns.length).fill(-1)
+  for (let column = 0; column < columns.length; column++) {
+    let most = 0
+    for (const member of set) {
+      const value = rows[member]![column]!
+      if (value > most || (value === most && value > 0 && member < by[column]!)) {
+        most = value
+        by[column] = member
+      }
+    }
+  }
+  return by
+}
+
+/** Leaves out, weakest first, whoever explains nothing better than the others or may not stand beside them. */
+function prune(set: readonly number[], table: Table): readonly number[] {
+  let kept = set
+  for (;;) {
+    const by = explainers(kept, table)
+    let weakest = -1
+    for (const member of kept) if (member > weakest && !earnsItsPlace(member, by, kept, table)) weakest = member
+    if (weakest < 0) return kept
+    kept = kept.filter((member) => member !== weakest)
+  }
+}
+
+/** A cause with nothing seen for it stands only where its rule allows, and never beside a rival: the measurement was taken once. */
+function earnsItsPlace(member: number, by: Int32Array, set: readonly number[], { list, isSeen }: Table): boolean {
+  let explains = false
+  for (let column = 0; column < by.length; column++) {
+    if (by[column] !== member) continue
+    if (isSeen[column]) return true
+    explains = true
+  }
+  const candidate = list[member]!
+  return explains && candidate.alone && !set.some((other) => other < member && (list[other]!.rule === candidate.rule || areRivals(candidate.rule, list[other]!.rule)))
+}
+
+function valueOf(set: readonly number[], table: Table): number {
+  const by = explainers(set, table)
+  let value = 0
+  for (let column = 0; column < by.length; column++) if (by[column]! >= 0) value += table.rows[by[column]!]![column]! + (table.isSeen[column] ? openCost : 0)
+  for (const member of set) value += table.bonus[member]! - causeCost
+  return value
+}
