@@ -295,12 +295,15 @@ export function askFor(sign: Sign, as?: AmountKind): { as: AmountKind; ask: stri
 
 /** Where it is, in a few words below the sentence: "Both sides, at the side seam, towards the hip". */
 export function placeOf(o: Pick<Observation, 'side'> & Said): string {
-  const parts = [sideWords[o.side]]
-  if (o.line && !sentenceOf(o).toLowerCase().includes(lineWords[o.line])) parts.push(`at the ${lineWords[o.line]}`)
+  // "Centre, at the centre back" says one thing twice.
+  const parts = o.side === 'centre' && o.line?.startsWith('centre') && !sentenceOf(o).toLowerCase().includes(lineWords[o.line]) ? [capital(lineWords[o.line])] : [sideWords[o.side]]
+  if (o.line && parts[0] !== capital(lineWords[o.line]) && !sentenceOf(o).toLowerCase().includes(lineWords[o.line])) parts.push(`at the ${lineWords[o.line]}`)
   if (o.towards && !sentenceOf(o).includes(targetWords[o.towards])) parts.push(['up', 'down', 'in', 'out'].includes(o.towards) ? targetWords[o.towards] : `towards ${targetWords[o.towards]}`)
   if (o.direction && o.sign === 'excess' && !sentenceOf(o).includes(directionWords[o.direction])) parts.push(`folds ${directionWords[o.direction]}`)
   return parts.join(', ')
 }
+
+const capital = (text: string) => text[0]!.toUpperCase() + text.slice(1)
 
 /** Cloth in an amount, in mm: a pinched fold holds twice its depth. */
 export const clothMm = (amount: Amount): number => (amount.as === 'fold-depth' ? amount.mm * 2 : amount.mm)
