@@ -4,7 +4,7 @@ import { auditEntries } from '#db/schema/auditEntries.ts'
 export type AuditEvent =
   | 'sign-up' | 'sign-in' | 'sign-in.failed' | 'sign-out' | 'session.ended' | 'password.changed' | 'password.reset-requested' | 'password.reset'
   | 'member.added' | 'member.role' | 'member.removed' | 'wearer.removed' | 'measurements.removed' | 'pattern.removed'
-  | 'project.removed' | 'photograph.removed' | 'export'
+  | 'project.removed' | 'project.cleared' | 'photograph.removed' | 'export'
 
 export const auditQueries = (db: Queryable) => ({
   /** @param details - ids and words of our own; never an address, a name or what was typed */
