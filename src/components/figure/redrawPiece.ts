@@ -28,20 +28,33 @@ function along(points: readonly Pt[], curved: boolean): Pt[] {
   })
 }
 
-/** The name of the edge an instruction means, in the words of either. */
+/** Points along an edge as it is drawn. */
+export const edgePoints = (edge: PieceShape['edges'][number]): Pt[] => along(edge.points, edge.curved === true)
+
+/** How instructions call the edges of a drawing. */
+const callings: readonly [edge: RegExp, said: RegExp][] = [
+  [/^waist|^upper edge/, /top edge|upper edge|waist/], [/^centre/, /centre|fold edge/], [/^crotch/, /crotch|seat seam/], [/^neckline/, /neck/], [/^inseam/, /inseam|inside leg/], [/^side seam|^underarm/, /side ?seam|side|underarm/],
+  [/^cap/, /cap/], [/^hem|^lower edge/, /hem|wrist|lower edge/], [/^shoulder/, /shoulder/], [/^armhole/, /arm/], [/^princess/, /princess/], [/^end|^front end/, /end/], [/^outer edge/, /outer/], [/^yoke seam/, /yoke seam/], [/^opening/, /opening/],
+]
+/** The edge an instruction names first, in the words of either; null where it names a line inside the piece. */
 export function edgeOf(shape: PieceShape, words: string): string | null {
   const text = words.toLowerCase().replaceAll('-', ' ')
-  const same: [RegExp, RegExp][] = [[/centre/, /centre/], [/crotch/, /crotch/], [/neck/, /neckline/], [/top edge|waist/, /waist/], [/inseam|inside leg/, /inseam/], [/side/, /side seam|underarm/], [/underarm/, /underarm|side seam/], [/cap/, /^cap/], [/hem|wrist/, /hem|lower edge/], [/shoulder/, /shoulder/], [/arm/, /armhole/], [/princess/, /princess/]]
-  const exact = shape.edges.find(({ name }) => text.includes(name))
-  if (exact) return exact.name
-  for (const [said, name] of same) if (said.test(text)) { const found = shape.edges.find((edge) => name.test(edge.name)); if (found) return found.name }
-  return null
+  const placed = shape.edges.flatMap(({ name }) => {
+    const said = callings.find(([edge]) => edge.test(name))?.[1]
+    const at = said ? text.search(said) : text.indexOf(name)
+    return at < 0 ? [] : [{ name, at }]
+  })
+  return placed.toSorted((one, other) => one.at - other.at)[0]?.name ?? null
 }
 /** The height of the line an instruction means. */
 function lineOf(shape: PieceShape, words: string): number {
   const text = words.toLowerCase()
-  const found = Object.entries(shape.lines).find(([name]) => text.includes(name))
-  return found?.[1] ?? shape.lines.lengthen ?? 300
+  // The longest name wins: "back waist" lies above the "waist" edge.
+  const found = Object.entries(shape.lines).filter(([name]) => text.includes(name)).toSorted(([one], [other]) => other.length - one.length)[0]
+  const y = found?.[1] ?? shape.lines.lengthen ?? 300
+  // A cut on the very edge would show nothing: it is drawn just inside.
+  const [top, bottom] = [topOf(shape) + 6, bottomOf(shape) - 6]
+  return Math.min(bottom - (bottom - top) * 0.14, Math.max(top + (bottom - top) * 0.1, y))
 }
 
 /** Draws one step of a change on a plain piece: old line, new line, where to slash and where the hinge is. */

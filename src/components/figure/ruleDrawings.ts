@@ -1,6 +1,7 @@
 import { type ChangeDrawing, type SignDrawing } from '#shared/fit/rule.ts'
 import { figureSize, type Pt } from './figureShapes.ts'
 import { type PieceShape } from './pieceShapes.ts'
+import { edgePoints } from './redrawPiece.ts'
 import { type FigureStroke } from './signStrokes.ts'
 
 const onSheet = ([x, y]: readonly [number, number]): Pt => [x * figureSize.width, y * figureSize.height]
@@ -27,5 +28,11 @@ export function marksOn(shape: PieceShape, drawing: ChangeDrawing): { kind: Chan
   const [left, right] = [Math.min(...points.map((p) => p[0])), Math.max(...points.map((p) => p[0]))]
   const [top, bottom] = [Math.min(...points.map((p) => p[1])), Math.max(...points.map((p) => p[1]))]
   const place = ([x, y]: readonly [number, number]): Pt => [left + x * (right - left), top + y * (bottom - top)]
-  return drawing.marks.map(({ kind, from, to, label = '' }) => ({ kind, from: place(from), to: place(to), label }))
+  return drawing.marks.map(({ kind, from, to, label = '' }) => ({ kind, from: onOutline(shape, place(from)), to: onOutline(shape, place(to)), label }))
+}
+
+/** An end meant to lie on the edge lies on it: outlines of drawings differ by a little. */
+function onOutline(shape: PieceShape, p: Pt): Pt {
+  const near = shape.edges.flatMap((edge) => edgePoints(edge)).map((q) => ({ q, far: Math.hypot(q[0] - p[0], q[1] - p[1]) })).toSorted((a, b) => a.far - b.far)[0]!
+  return near.far < 22 ? near.q : p
 }

@@ -1,23 +1,19 @@
-import { fillAmounts } from '#shared/fit/amountText.ts'
-import { type ChangeStep, type PaperChange } from '#shared/fit/types.ts'
-import { computed, ref, type Ref, watch } from 'vue'
+import { type PaperChange } from '#shared/fit/types.ts'
+import { withAmount } from '#shared/fit/withAmount.ts'
+import { computed, type MaybeRefOrGetter, ref, toValue, watch } from 'vue'
 
 /**
- * A change with its amount being turned: every paper amount follows in proportion, in the drawing and in the words. Parts stay whole
- * millimetres only where the server splits them again; here they are shown.
- * @param paper - the change as suggested or as kept
+ * A change with its amount being turned: every paper amount follows, in the drawing and in the words, and still adds up.
+ * @param given - the change as suggested or as kept
+ * @param stepMm - what is drawn: 1 mm, or a sixteenth of an inch
  */
-export function useChangeDraft(paper: Ref<PaperChange | null>, format: (mm: number, options?: { signed?: boolean }) => string) {
-  const amountMm = ref(paper.value?.amountMm ?? 0)
-  watch(() => paper.value?.amountMm, (now) => { amountMm.value = now ?? 0 })
-  const factor = computed(() => (paper.value && paper.value.amountMm !== 0 ? amountMm.value / paper.value.amountMm : 1))
-  const changed = computed(() => paper.value !== null && Math.abs(amountMm.value - paper.value.amountMm) > 0.01)
-  const steps = computed<ChangeStep[]>(() => (paper.value?.steps ?? []).map((step) => ({ ...step, amountMm: step.amountMm * factor.value })))
-
-  /** Words of the rules with the amounts that belong to this change turned too; measures of the piece stay. */
-  function say(text: string): string {
-    const own = new Set([paper.value?.amountMm ?? 0, ...(paper.value?.steps ?? []).map((step) => step.amountMm)].map((mm) => Math.round(Math.abs(mm) * 100)))
-    return fillAmounts(text, (mm, signed) => format(own.has(Math.round(Math.abs(mm) * 100)) ? mm * factor.value : mm, { signed }))
-  }
-  return { amountMm, changed, steps, say }
+export function useChangeDraft(given: MaybeRefOrGetter<PaperChange | null>, stepMm: MaybeRefOrGetter<number>) {
+  const amountMm = ref(toValue(given)?.amountMm ?? 0)
+  watch(() => toValue(given)?.amountMm, (now) => { amountMm.value = now ?? 0 })
+  const isChanged = computed(() => Math.abs(amountMm.value - (toValue(given)?.amountMm ?? 0)) > 0.01)
+  const paper = computed(() => {
+    const change = toValue(given)
+    return change && isChanged.value && change.amountMm !== 0 ? withAmount(change, amountMm.value, { stepMm: toValue(stepMm) }) : change
+  })
+  return { amountMm, isChanged, paper }
 }

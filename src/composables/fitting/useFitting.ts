@@ -83,7 +83,7 @@ export function useFitting(projectId: string, number: number, me: () => { id: st
     /** first seen on this sample */
     seenHere: computed(() => observations.value.filter(({ sampleNumber }) => sampleNumber === number)),
     /** of earlier samples, asked again here */
-    askedAgain: computed(() => observations.value.filter(({ sampleNumber }) => sampleNumber < number)),
+    askedAgain: computed(() => observations.value.filter(({ sampleNumber, state }) => sampleNumber < number && state !== 'let-be')),
   }
 }
 export type FittingSession = ReturnType<typeof useFitting>
