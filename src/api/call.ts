@@ -26,6 +26,9 @@ export type CallOptions<R extends Route> = Part<R, 'params'> & (R['query'] exten
 
 const lostConnection = 'The connection dropped. What you typed is still here; try again when you are back on the line.'
 let onSignedOut: () => void = () => {}
+/** The answer cannot be used: usually this page is older than the server that answered. */
+const unreadable = (status: number) => new ApiError(status, 'answer.unreadable', 'The journal answered in a way this page does not know. Load the page again.')
+
 /** What happens when the server says that nobody is signed in any more. */
 export const whenSignedOut = (run: () => void) => { onSignedOut = run }
 
@@ -36,12 +39,20 @@ export function addressOf(route: Route, params: Record<string, unknown> = {}, qu
   return search.size ? `${path}?${search}` : path
 }
 
-/** The error an answer carries, in the person's words. */
-export function errorOf(status: number, body: unknown, retryAfter: string | null): ApiError {
+/** The error an answer carries, in the person's words. That nobody is signed in any more is also told to `whenSignedOut`. */
+export function readRefusal(status: number, body: unknown, retryAfter: string | null): ApiError {
   const parsed = apiError.safeParse(body)
   const seconds = retryAfter === null ? null : Number(retryAfter) || null
+  if (parsed.success && parsed.data.error.code === 'sign-in.needed') onSignedOut()
   if (parsed.success) return new ApiError(status, parsed.data.error.code, parsed.data.error.message, parsed.data.error.details, seconds)
   return new ApiError(status, 'network', status >= 500 ? 'The journal could not answer. Try again in a moment.' : lostConnection, {}, seconds)
+}
+
+/** The answer as the contract describes it. @throws ApiError when it is something else */
+export function readAnswer<R extends Route>(route: R, status: number, answer: unknown): RouteResponse<R> {
+  const read = route.response?.safeParse(answer)
+  if (read && !read.success) throw unreadable(status)
+  return read?.data as RouteResponse<R>
 }
 
 /**
@@ -66,10 +77,15 @@ export async function call<const R extends Route>(route: R, ...[options]: object
     throw new ApiError(0, 'network', lostConnection)
   }
   if (!response.ok) {
-    const failed = errorOf(response.status, await response.json().catch(() => null), response.headers.get('Retry-After'))
-    if (failed.code === 'sign-in.needed') onSignedOut()
-    throw failed
+    throw readRefusal(response.status, await response.json().catch(() => null), response.headers.get('Retry-After'))
   }
   if (!route.response) return undefined as RouteResponse<R>
-  return route.response.parse(await response.json()) as RouteResponse<R>
+  let answer: unknown
+  try {
+    answer = await response.json()
+  } catch (failure) {
+    if (signal?.aborted) throw failure
+    throw failure instanceof SyntaxError ? unreadable(response.status) : new ApiError(0, 'network', lostConnection)
+  }
+  return readAnswer(route, response.status, answer)
 }

@@ -1,5 +1,5 @@
 import { type Route, type RouteInput, type RouteResponse } from '#shared/contracts/route.ts'
-import { ApiError, addressOf, errorOf } from './call.ts'
+import { ApiError, addressOf, readAnswer, readRefusal } from './call.ts'
 
 export type UploadOptions<R extends Route> = {
   params: RouteInput<R, 'params'>
@@ -29,8 +29,12 @@ export function upload<const R extends Route>(route: R, { params, body, file, id
     request.upload.onprogress = ({ loaded, total }) => { sent = total ? loaded / total : 0; onProgress?.(sent) }
     request.onload = () => {
       const answer: unknown = (() => { try { return JSON.parse(request.responseText) } catch { return null } })()
-      if (request.status >= 200 && request.status < 300) resolve(route.response?.parse(answer) as RouteResponse<R>)
-      else reject(errorOf(request.status, answer, request.getResponseHeader('Retry-After')))
+      try {
+        if (request.status < 200 || request.status >= 300) throw readRefusal(request.status, answer, request.getResponseHeader('Retry-After'))
+        resolve(readAnswer(route, request.status, answer))
+      } catch (failure) {
+        reject(failure)
+      }
     }
     request.onerror = () => reject(new ApiError(0, 'network', `The connection dropped at ${Math.round(sent * 100)} %. The photograph is still on this device; send it again.`))
     request.onabort = () => reject(new DOMException('Cancelled', 'AbortError'))

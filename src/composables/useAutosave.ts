@@ -1,4 +1,4 @@
-import { onScopeDispose, readonly, ref } from 'vue'
+import { onScopeDispose, readonly, ref, shallowRef } from 'vue'
 import { ApiError } from '@/api/call.ts'
 
 export type SaveState = 'saved' | 'saving' | 'waiting' | 'failed' | 'clash'
@@ -12,6 +12,7 @@ export type SaveState = 'saved' | 'saving' | 'waiting' | 'failed' | 'clash'
 export function useAutosave(save: () => Promise<void>, { delayMs = 600, onClash = (_theirs: unknown) => {} } = {}) {
   const state = ref<SaveState>('saved')
   const problem = ref('')
+  const savedAt = shallowRef<Date | null>(null)
   let timer: ReturnType<typeof setTimeout> | undefined
   let changed = false
   let running = false
@@ -31,6 +32,7 @@ export function useAutosave(save: () => Promise<void>, { delayMs = 600, onClash 
     try {
       await save()
       problem.value = ''
+      savedAt.value = new Date()
       state.value = changed ? 'waiting' : 'saved'
     } catch (failure) {
       changed = true
@@ -48,10 +50,14 @@ export function useAutosave(save: () => Promise<void>, { delayMs = 600, onClash 
     if (changed) await flush()
   }
   const leaving = (event: BeforeUnloadEvent) => { if (changed || running) event.preventDefault() }
+  // What could not be sent goes out by itself when the line is back.
+  const back = () => { if (state.value === 'failed') void flush() }
   window.addEventListener('beforeunload', leaving)
+  window.addEventListener('online', back)
   onScopeDispose(() => {
     window.removeEventListener('beforeunload', leaving)
+    window.removeEventListener('online', back)
     void flush()
   })
-  return { state: readonly(state), problem: readonly(problem), touch, flush }
+  return { state: readonly(state), problem: readonly(problem), savedAt: readonly(savedAt), touch, flush }
 }

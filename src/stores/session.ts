@@ -11,6 +11,10 @@ import { ApiError, call } from '@/api/call.ts'
 export const useSessionStore = defineStore('session', () => {
   const me = shallowRef<Me | null>(null)
   const known = shallowRef(false)
+  /** the server could not say who is signed in: its sentence, or empty */
+  const away = shallowRef('')
+  /** whether somebody was signed in here last time, so that the front door does not ask for nothing */
+  const wasIn = useLocalStorage('proofcloth.was-in', false)
   const keptStudio = useLocalStorage('proofcloth.studio', '')
   const keptUnit = useLocalStorage<Unit>('proofcloth.unit', 'cm')
 
@@ -21,16 +25,18 @@ export const useSessionStore = defineStore('session', () => {
   function take(person: Me | null) {
     me.value = person
     known.value = true
+    away.value = ''
+    wasIn.value = person !== null
     if (person) keptUnit.value = person.units
   }
-  /** Asks once who is signed in; afterwards it is known. */
+  /** Asks once who is signed in; afterwards it is known. When the journal cannot be reached, `away` says so and it stays unknown. */
   async function load() {
     if (known.value) return
     try {
       take(await call(readMe))
     } catch (failure) {
       if (failure instanceof ApiError && failure.status === 401) take(null)
-      else throw failure
+      else away.value = failure instanceof Error ? failure.message : 'The journal could not be reached.'
     }
   }
   const signIn = async (body: RouteInput<typeof signInRoute, 'body'>) => take(await call(signInRoute, { body }))
@@ -49,5 +55,5 @@ export const useSessionStore = defineStore('session', () => {
   const rename = async (name: string) => { me.value = await call(updateMe, { body: { name } }) }
   const chooseStudio = (studioId: string) => { keptStudio.value = studioId }
   const forget = () => take(null)
-  return { me, known, studio, unit, can, load, signIn, signUp, signOut, setUnit, rename, chooseStudio, forget }
+  return { me, known, away, wasIn, studio, unit, can, load, signIn, signUp, signOut, setUnit, rename, chooseStudio, forget }
 })
