@@ -22,10 +22,13 @@ export function spokenLabel(observation: FittingObservation, changes: readonly C
 /** Below the sentence: where it is, and why it was let be. */
 export const belowWords = (observation: FittingObservation): string => (observation.state === 'let-be' && observation.letBeReason ? observation.letBeReason : placeOf(observation))
 
+/** Cloth in the measure an observation was taken in: half of it where that is the depth of a fold. */
+export const inMeasureOf = (observation: Pick<FittingObservation, 'amount'>, mm: number): number => (observation.amount?.as === 'fold-depth' ? mm / 2 : mm)
+
 /** What was foretold for this sample: "should be gone", "0.4 cm left". */
-export function foretold(observation: Pick<FittingObservation, 'predicted'>, format: Format): string {
+export function foretold(observation: Pick<FittingObservation, 'predicted' | 'amount'>, format: Format): string {
   if (!observation.predicted) return ''
-  return observation.predicted.expectedMm < 1 ? 'should be gone' : `${format(observation.predicted.expectedMm)} left`
+  return observation.predicted.expectedMm < 1 ? 'should be gone' : `${format(inMeasureOf(observation, observation.predicted.expectedMm))} left`
 }
 
 /** What became of it: "Better by 0.8 cm". */
@@ -33,7 +36,7 @@ export function outcomeWords(observation: Pick<FittingObservation, 'amount'>, re
   if (reading.gone) return 'Gone'
   const before = observation.amount ? clothMm(observation.amount) : null
   const now = reading.amount ? clothMm(reading.amount) : null
-  const by = before !== null && now !== null && Math.abs(before - now) >= 1 ? ` by ${format(Math.abs(before - now))}` : ''
+  const by = before !== null && now !== null && Math.abs(before - now) >= 1 ? ` by ${format(inMeasureOf(observation, Math.abs(before - now)))}` : ''
   switch (reading.outcome) {
     case 'settled': return 'Settled'
     case 'better': return `Better${by}`

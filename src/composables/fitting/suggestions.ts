@@ -1,5 +1,5 @@
 import { type Change, type Fitting } from '#shared/contracts/fitting.ts'
-import { type Finding, type Side } from '#shared/fit/types.ts'
+import { type Finding, type PaperChange, type Side } from '#shared/fit/types.ts'
 
 /** Address of a suggestion: what it says and which side it is for. */
 export const suggestionId = ({ cause, side }: { cause: string; side: Side }): string => `${cause}~${side}`
@@ -45,6 +45,9 @@ export function notchesOf(cards: readonly ChangeCard[]): Map<string, number> {
   for (const card of cards) for (const id of card.explains) if (!map.has(id)) map.set(id, card.notches)
   return map
 }
+
+/** Where an amount came from, beside it. */
+export const amountFromWords: Record<PaperChange['amountFrom'], string> = { 'measured on sample': 'measured on the sample', measurements: 'from the measurements', 'usual for this sign': 'usual for this sign' }
 
 /** Beyond what the rule allows: the sentence that says so, or empty. */
 export function limitWarning(finding: Pick<Finding, 'change'>, amountMm: number, format: (mm: number) => string): string {

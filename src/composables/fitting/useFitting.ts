@@ -57,7 +57,10 @@ export function useFitting(projectId: string, number: number, me: () => { id: st
       refreshSoon()
       return done
     } catch (failure) {
-      setProblem(key, explainFailure(failure).message)
+      const { kind, message } = explainFailure(failure)
+      setProblem(key, message)
+      // Someone was faster: what they made is shown beside the message.
+      if (kind === 'stale') refreshSoon()
       return null
     } finally {
       const left = new Set(busy.value)

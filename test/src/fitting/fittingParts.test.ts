@@ -18,7 +18,7 @@ describe('an earlier observation asked again', () => {
   const row = (more = {}, props = {}) => mount(AskedAgainRow, { props: { observation: shown(more), sampleNumber: 2, mayMark: true, busy: false, problem: '', ...props }, global: global() })
   it('shows what was foretold and the old amount struck', () => {
     const seen = row({ predicted: { sampleNumber: 2, expectedMm: 4, changeMm: 20, text: '' } })
-    expect(textOf(seen)).toContain('should have 0.4 cm left')
+    expect(textOf(seen)).toContain('should have 0.2 cm left')
     expect(textOf(seen.find('s'))).toContain('1.2 cm')
   })
   it('is settled with one press', async () => {
@@ -31,7 +31,7 @@ describe('an earlier observation asked again', () => {
     await button(seen, 'Still there').trigger('click')
     expect(textOf(seen)).toContain('How deep is the fold?')
     await button(seen, 'Keep this reading').trigger('click')
-    expect(seen.emitted('read')).toEqual([[{ gone: false, reversed: false, amount: { mm: 4, as: 'fold-depth' } }]])
+    expect(seen.emitted('read')).toEqual([[{ gone: false, reversed: false, amount: { mm: 2, as: 'fold-depth' } }]])
   })
   it('notes a change that went too far as the other way', async () => {
     const seen = row()
@@ -69,7 +69,7 @@ describe('the editor of an observation', () => {
   it('shows both states of a clash and lets the person pick', async () => {
     const theirs = shown({ note: 'hers', amount: { mm: 10, as: 'fold-depth' }, by: { id: 'r', name: 'Rosalind' }, version: 4 })
     const open = editor({ clash: { id: 'o1', mine: { note: 'mine', amount: { mm: 15, as: 'fold-depth' } }, theirs } })
-    expect(open.text()).toContain('Rosalind changed observation 1 meanwhile')
+    expect(open.text()).toContain('Observation 1 was changed by someone else meanwhile')
     for (const words of ['hers', 'mine', '1.0 cm', '1.5 cm']) expect(textOf(open.find('.clash'))).toContain(words)
     await button(open, 'Keep mine').trigger('click')
     expect(open.emitted('clash')).toEqual([['mine']])
@@ -82,7 +82,7 @@ describe('a suggestion', () => {
   })
   it('says what it would settle, how much, and both sides of why', () => {
     const text = textOf(card())
-    for (const words of ['Would settle', '+3.0 cm', 'measured on sample', 'Speaks for it', 'Speaks against it', 'The back is as tight', 'common practice']) expect(text).toContain(words)
+    for (const words of ['Would settle', '+3.0 cm', 'measured on the sample', 'Speaks for it', 'Speaks against it', 'The back is as tight', 'common practice']) expect(text).toContain(words)
   })
   it('is accepted, or declined with a reason', async () => {
     const one = card()

@@ -22,9 +22,9 @@ describe('what was foretold', () => {
   })
 })
 describe('what became of it', () => {
-  it('counts a pinched fold as the cloth that is in it', () => {
+  it('compares in the measure the observation was taken in', () => {
     const fold = seen({ sign: 'excess', zone: 'waist', amount: { mm: 8, as: 'fold-depth' } })
-    expect(outcomeWords(fold, reading({ outcome: 'better', amount: { mm: 3, as: 'fold-depth' } }), cm)).toBe('Better by 1.0 cm')
+    expect(outcomeWords(fold, reading({ outcome: 'better', amount: { mm: 3, as: 'fold-depth' } }), cm)).toBe('Better by 0.5 cm')
   })
   it('says how far a change went past its place', () => expect(outcomeWords(seen(), reading({ outcome: 'overdone', reversed: true, amount: { mm: 4, as: 'fold-depth' } }), cm)).toBe('Went too far by 0.8 cm'))
   it('says gone when it is gone', () => expect(outcomeWords(seen(), reading({ gone: true, outcome: 'settled' }), cm)).toBe('Gone'))
