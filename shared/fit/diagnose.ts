@@ -4,7 +4,7 @@ import { type Candidate, gatherCandidates, observationColumn } from './reasoning
 import { contradictoryChanges, contradictoryObservations } from './reasoning/conflicts.ts'
 import { coverObservations } from './reasoning/cover.ts'
 import { bringBackFinding, type FindingContext, findingOf, overdoneFinding } from './reasoning/findings.ts'
-import { isReversal, ledgerState, type LedgerState } from './reasoning/ledgerState.ts'
+import { isReversal, ledgerState, type LedgerState, mergeEntries } from './reasoning/ledgerState.ts'
 import { pairSides } from './reasoning/matchSign.ts'
 import { lookNext, missingFor } from './reasoning/openQuestions.ts'
 import { correctForEarlier, inWorkingOrder } from './reasoning/order.ts'
@@ -21,7 +21,7 @@ export function diagnose(input: FitInput, index: RuleIndex = catalogueIndex): Di
   const stepMm = paperStepMm[input.unit ?? 'cm']
   const contradictions = contradictoryObservations(input.observations)
   const contradicted = new Set(contradictions.flatMap(({ observationIds }) => observationIds))
-  const ledger = input.ledger.flatMap((entry) => (index.byCause.has(entry.cause) ? [ledgerState(entry, index.byCause.get(entry.cause)!)] : []))
+  const ledger = mergeEntries(input.ledger).flatMap((entry) => (index.byCause.has(entry.cause) ? [ledgerState(entry, index.byCause.get(entry.cause)!)] : []))
 
   const overdone = ledger.filter(({ status }) => status === 'overdone').map((state) => ({ state, reversed: input.observations.filter((one) => !contradicted.has(one.id) && isReversed(state, one)) }))
   const accounted = new Set(overdone.flatMap(({ reversed }) => reversed.map(({ id }) => id)))

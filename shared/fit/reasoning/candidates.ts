@@ -148,7 +148,7 @@ function ledgerEvidence(rule: Rule, side: CandidateSide, ledger: readonly Ledger
     if (cause === rule.cause && state.side === side) {
       if (state.status === 'worse') told.push({ evidence: { text: 'The change made for it was followed by more of the same, not less.', speaks: 'against', strength: 'decisive', from: { ledger: cause } } })
       if (state.status === 'better') told.push({ column: `ledger ${cause} ${side}`, evidence: { text: 'The change made for it helped, and part of it is left.', speaks: 'for', strength: 'strong', from: { ledger: cause } } })
-      if (state.status === 'same') told.push({ column: `ledger ${cause} ${side}`, evidence: { text: 'The change made for it was hardly answered by the cloth.', speaks: 'for', strength: 'fair', from: { ledger: cause } } })
+      if (state.status === 'same') told.push({ column: `ledger ${cause} ${side}`, evidence: { text: 'The change made for it was hardly answered by the cloth, and the sign is still there.', speaks: 'for', strength: 'strong', from: { ledger: cause } } })
     } else if ((state.status === 'worse' || state.status === 'same') && areRivals(rule, index.byCause.get(cause))) {
       const strength = state.status === 'worse' ? 'strong' : 'slight'
       told.push({ evidence: { text: state.status === 'worse' ? `“${state.rule.title}” made it worse: the next likely cause moves up.` : `“${state.rule.title}” was hardly answered.`, speaks: 'for', strength, from: { ledger: cause } } })

@@ -22,6 +22,17 @@ export type LedgerState = {
 
 export const sideOfEntry = (side: LedgerEntry['side']): CandidateSide => (side === 'left' || side === 'right' ? side : 'both')
 
+/** Several changes for one cause on one side are one change made in steps. */
+export function mergeEntries(entries: readonly LedgerEntry[]): LedgerEntry[] {
+  const merged = new Map<string, LedgerEntry>()
+  for (const entry of entries) {
+    const key = `${entry.cause} ${sideOfEntry(entry.side)}`
+    const known = merged.get(key)
+    merged.set(key, known ? { ...known, amountMm: known.amountMm + entry.amountMm, readings: [...known.readings, ...entry.readings] } : entry)
+  }
+  return [...merged.values()]
+}
+
 /** What the samples since a change say about it. */
 export function ledgerState(entry: LedgerEntry, rule: Rule): LedgerState {
   const known = { entry, rule, side: sideOfEntry(entry.side), doneMm: Math.abs(entry.amountMm) }
@@ -29,14 +40,15 @@ export function ledgerState(entry: LedgerEntry, rule: Rule): LedgerState {
   const main = chains[0]
   const last = main?.at(-1)
   if (!last) return { ...known, status: 'not-looked', response: 1, remainingMm: 0, reading: null }
-  return { ...known, status: statusOf(last), response: pooledResponse(chains), remainingMm: last.afterMm, reading: last }
+  return { ...known, status: statusOf(main[0]!, last), response: pooledResponse(chains), remainingMm: last.afterMm, reading: last }
 }
 
-function statusOf({ beforeMm, afterMm }: LedgerReading): LedgerState['status'] {
+/** Worse is told from the last sample alone; hardly answered only where all the samples together moved nothing. */
+function statusOf(first: LedgerReading, { beforeMm, afterMm }: LedgerReading): LedgerState['status'] {
   if (afterMm <= -leastChangeMm) return 'overdone'
   if (afterMm < leastChangeMm) return 'settled'
   if (afterMm - beforeMm >= leastChangeMm) return 'worse'
-  return beforeMm - afterMm < leastChangeMm ? 'same' : 'better'
+  return first.beforeMm - afterMm < leastChangeMm ? 'same' : 'better'
 }
 
 /** The readings of each observation, oldest first; those whose sign measures the cause itself before the rest, larger ones first. */
