@@ -24,19 +24,20 @@ export type ProjectState = {
 export async function readProjectState(db: Queryable, projectId: string): Promise<ProjectState> {
   const sampleRows = await db.select().from(samples).where(eq(samples.projectId, projectId)).orderBy(asc(samples.number))
   const sampleIds = sampleRows.map(({ id }) => id)
-  const [photographRows, observationRows, changeRows, pieceRows] = await Promise.all([
-    sampleIds.length ? db.select().from(photographs).where(and(inArray(photographs.sampleId, sampleIds), isNotNull(photographs.storedAt), isNull(photographs.removedAt))).orderBy(asc(photographs.createdAt)) : [],
-    db.select().from(observations).where(and(eq(observations.projectId, projectId), isNull(observations.removedAt))).orderBy(asc(observations.number)),
-    db.select().from(changes).where(eq(changes.projectId, projectId)).orderBy(asc(changes.decidedAt)),
-    db.select().from(pieces).where(eq(pieces.projectId, projectId)).orderBy(asc(pieces.number)),
-  ])
+  // One after the other: inside a transaction they share one connection anyway.
+  const [photographRows, observationRows, changeRows, pieceRows] = [
+    sampleIds.length ? await db.select().from(photographs).where(and(inArray(photographs.sampleId, sampleIds), isNotNull(photographs.storedAt), isNull(photographs.removedAt))).orderBy(asc(photographs.createdAt)) : [],
+    await db.select().from(observations).where(and(eq(observations.projectId, projectId), isNull(observations.removedAt))).orderBy(asc(observations.number)),
+    await db.select().from(changes).where(eq(changes.projectId, projectId)).orderBy(asc(changes.decidedAt)),
+    await db.select().from(pieces).where(eq(pieces.projectId, projectId)).orderBy(asc(pieces.number)),
+  ]
   const observationIds = observationRows.map(({ id }) => id)
   const changeIds = changeRows.map(({ id }) => id)
-  const [readingRows, links, transferRows] = await Promise.all([
-    observationIds.length ? db.select().from(readings).where(inArray(readings.observationId, observationIds)) : [],
-    changeIds.length ? db.select().from(changeObservations).where(inArray(changeObservations.changeId, changeIds)) : [],
-    changeIds.length ? db.select({ changeId: transfers.changeId, pieceId: transfers.pieceId }).from(transfers).where(inArray(transfers.changeId, changeIds)) : [],
-  ])
+  const [readingRows, links, transferRows] = [
+    observationIds.length ? await db.select().from(readings).where(inArray(readings.observationId, observationIds)) : [],
+    changeIds.length ? await db.select().from(changeObservations).where(inArray(changeObservations.changeId, changeIds)) : [],
+    changeIds.length ? await db.select({ changeId: transfers.changeId, pieceId: transfers.pieceId }).from(transfers).where(inArray(transfers.changeId, changeIds)) : [],
+  ]
   const userIds = new Set([...photographRows.map(({ takenBy }) => takenBy), ...observationRows.map(({ notedBy }) => notedBy), ...readingRows.map(({ readBy }) => readBy), ...changeRows.map(({ decidedBy }) => decidedBy)].filter((id) => id !== null))
   const people = userIds.size ? await db.select({ id: users.id, name: users.name }).from(users).where(inArray(users.id, [...userIds])) : []
   const kept = new Set(observationIds)

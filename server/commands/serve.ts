@@ -1,0 +1,14 @@
+import { connect } from '#db/client.ts'
+import { migrate } from '#db/migrate.ts'
+import { startServer, stopOnSignals } from '../main.ts'
+import { readSettings } from '../settings.ts'
+import { runCommand } from './ending.ts'
+
+// npm run serve: production. Settings come from the environment and are checked before anything else; no demo account is ever made.
+await runCommand(async () => {
+  const settings = readSettings(process.env, 'production')
+  const { db, pool } = connect(settings.databaseUrl)
+  await migrate(db)
+  await pool.end()
+  stopOnSignals(await startServer(settings))
+})
