@@ -40,7 +40,7 @@ export function ledgerState(entry: LedgerEntry, rule: Rule): LedgerState {
   const main = chains[0]
   const last = main?.at(-1)
   if (!last) return { ...known, status: 'not-looked', response: 1, remainingMm: 0, reading: null }
-  return { ...known, status: statusOf(main[0]!, last), response: pooledResponse(chains), remainingMm: last.afterMm, reading: last }
+  return { ...known, status: statusOf(main![0]!, last), response: pooledResponse(chains), remainingMm: last.afterMm, reading: last }
 }
 
 /** Worse is told from the last sample alone; hardly answered only where all the samples together moved nothing. */

@@ -4,7 +4,7 @@ import { stages } from '../rule.ts'
 import { type FitInput, type Finding } from '../types.ts'
 import { overlaps } from './confidence.ts'
 import { sideOfEntry } from './ledgerState.ts'
-import { paperChange } from './paperChange.ts'
+import { leastOf, noChange, paperChange } from './paperChange.ts'
 import { type RuleIndex } from './ruleIndex.ts'
 
 /** Lengths and balance first, then from the top down; a change that goes back comes before any new one. */
@@ -35,5 +35,6 @@ function corrected(later: Finding, earlier: Finding, input: FitInput, stepMm: nu
   if (!byMm || amountMm * change.amountMm <= 0) return { ...later, change: { ...change, notes: [...change.notes, `After “${earlier.change.title}” this amount is asked again. ${move.note}`] } }
   const note = `${mmToken(change.amountMm)} by itself, ${mmToken(amountMm)} after “${earlier.change.title}”. ${move.note}`
   const again = paperChange({ rule, side: sideOfEntry(later.side), amountMm, amountFrom: change.amountFrom, otherAmount: change.otherAmount }, input, stepMm)
-  return { ...later, change: { ...again, notes: [...change.notes, note] } }
+  const full = { ...again, notes: [...change.notes, note] }
+  return Math.abs(amountMm) < leastOf(rule) ? { ...later, change: noChange(full), predicts: [], advice: 'leave-it' } : { ...later, change: full }
 }
