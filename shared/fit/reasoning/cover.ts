@@ -19,17 +19,19 @@ export type Cover = {
  * helps. Equal sets are told apart by the catalogue's order, never by the order of the observations.
  */
 export function coverObservations(candidates: readonly Candidate[]): Cover {
-  const table = tabulate([...candidates].sort((a, b) => ownPoints(b) - ownPoints(a) || a.place - b.place || (a.side < b.side ? -1 : 1)))
+  const table = tabulate(withoutOutdone([...candidates].sort((a, b) => ownPoints(b) - ownPoints(a) || a.place - b.place || (a.side < b.side ? -1 : 1))))
   let best: readonly number[] = []
   let bestValue = 0
-  for (let improved = true; improved;) {
-    improved = false
-    for (const next of neighbours(best, table.list.length)) {
+  const improve = (tries: Iterable<readonly number[]>): boolean => {
+    const before = bestValue
+    for (const next of tries) {
       const pruned = prune(next, table)
       const value = valueOf(pruned, table)
-      if (value > bestValue) [best, bestValue, improved] = [pruned, value, true]
+      if (value > bestValue) [best, bestValue] = [pruned, value]
     }
+    return bestValue > before
   }
+  while (improve(neighbours(best, table.list.length)) || improve(withPairs(best, table.list.length)));
   const by = explainers(best, table)
   const explainedBy = new Map<string, Candidate>()
   table.columns.forEach((column, i) => { if (by[i]! >= 0) explainedBy.set(column, table.list[by[i]!]!) })
@@ -38,6 +40,18 @@ export function coverObservations(candidates: readonly Candidate[]): Cover {
 
 /** All that speaks for a cause less all that speaks against it, whatever else is chosen. */
 export const ownPoints = ({ columns, bonus }: Candidate): number => [...columns.values()].reduce((sum, value) => sum + value, bonus)
+
+/** Whoever another one equals or beats at every column and in all else could never be the better choice: left out before the search. */
+function withoutOutdone(sorted: readonly Candidate[]): Candidate[] {
+  const kept: Candidate[] = []
+  for (const candidate of sorted) if (!kept.some((other) => outdoes(other, candidate))) kept.push(candidate)
+  return kept
+}
+function outdoes(a: Candidate, b: Candidate): boolean {
+  if (a.bonus < b.bonus || (!a.matches.size && !a.alone)) return false
+  for (const [column, value] of b.columns) if ((a.columns.get(column) ?? 0) < value) return false
+  return true
+}
 
 /** The candidates, strongest first, as rows of numbers: sets are weighed some thousand times. */
 type Table = { list: readonly Candidate[]; columns: readonly string[]; isSeen: readonly boolean[]; rows: readonly Int32Array[]; bonus: readonly number[] }
@@ -50,14 +64,21 @@ function tabulate(list: readonly Candidate[]): Table {
   }
 }
 
+const outsideOf = (set: readonly number[], count: number): number[] => Array.from({ length: count }, (_, i) => i).filter((i) => !set.includes(i))
+
 function* neighbours(set: readonly number[], count: number): Generator<readonly number[]> {
-  const outside = Array.from({ length: count }, (_, i) => i).filter((i) => !set.includes(i))
-  for (const one of outside) {
+  for (const one of outsideOf(set, count)) {
     yield [...set, one]
     for (const member of set) yield [...set.filter((other) => other !== member), one]
   }
   for (const member of set) yield set.filter((other) => other !== member)
-  if (outside.length <= mostForPairs) for (let a = 0; a < outside.length; a++) for (let b = a + 1; b < outside.length; b++) yield [...set, outside[a]!, outside[b]!]
+}
+
+/** Two causes at once that each by themselves would not pay beside those chosen. */
+function* withPairs(set: readonly number[], count: number): Generator<readonly number[]> {
+  const outside = outsideOf(set, count)
+  if (outside.length > mostForPairs) return
+  for (const [i, first] of outside.entries()) for (let j = i + 1; j < outside.length; j++) yield [...set, first, outside[j]!]
 }
 
 /** For each column the member that explains it best, −1 for none; of equals the one with more behind it, which stands first. */
