@@ -142,7 +142,8 @@ export function pinAnchor(kind: MarkKind, shape: MarkShape, points: readonly Px[
   }
   if (kind === 'length') return add(between(first, last, 0.5), [34, 0])
   if (kind === 'balance') return add(first, [0, -24])
-  return add(first, along, -16)
+  // Clear of the handle at the start, which is a target of its own.
+  return add(first, along, -26)
 }
 
 /** Shortest way from a point to the drawn stroke, in the same pixels. */

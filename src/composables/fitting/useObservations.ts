@@ -10,8 +10,8 @@ export type Failure = { kind: 'offline' | 'stale' | 'refused'; message: string; 
 export type ShownObservation = FittingObservation & { unsent: boolean }
 export type Clash = { id: string; mine: ObservationPatch; theirs: FittingObservation }
 /** `base` is the version the change was made on: null while the observation itself is still unsent. */
-type Pending = { patch: ObservationPatch; base: number | null; sending: boolean; message: string; clash: FittingObservation | null }
-type Creation = { id: string; key: string; body: ObservationInput; createdAt: string; sending: boolean; message: string }
+type Pending = { patch: ObservationPatch; base: number | null; sending: boolean; message: string; refused: boolean; clash: FittingObservation | null }
+type Creation = { id: string; key: string; body: ObservationInput; createdAt: string; sending: boolean; message: string; refused: boolean }
 
 export type ObservationServer = {
   create: (body: ObservationInput, key: string) => Promise<FittingObservation>
@@ -46,7 +46,7 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
   const setPending = (id: string, change: Partial<Pending> | null) => {
     const map = new Map(pending.value)
     if (change === null) map.delete(id)
-    else map.set(id, { ...(map.get(id) ?? { patch: {}, base: stored.value.find((one) => one.id === id)?.version ?? null, sending: false, message: '', clash: null }), ...change })
+    else map.set(id, { ...(map.get(id) ?? { patch: {}, base: stored.value.find((one) => one.id === id)?.version ?? null, sending: false, message: '', refused: false, clash: null }), ...change })
     pending.value = map
   }
   const setCreation = (id: string, change: Partial<Creation>) => { creations.value = creations.value.map((one) => (one.id === id ? { ...one, ...change } : one)) }
@@ -69,7 +69,7 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
   /** Notes what was seen; shown at once. Returns the id it has until the server gives one. */
   function add(body: ObservationInput): string {
     const id = crypto.randomUUID()
-    creations.value = [...creations.value, { id, key: crypto.randomUUID(), body, createdAt: new Date().toISOString(), sending: false, message: '' }]
+    creations.value = [...creations.value, { id, key: crypto.randomUUID(), body, createdAt: new Date().toISOString(), sending: false, message: '', refused: false }]
     void sendCreation(id)
     return id
   }
@@ -96,14 +96,15 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
       onSaved(made)
       if (waiting) void send(made.id)
     } catch (failure) {
-      setCreation(id, { sending: false, message: explain(failure).message })
+      const { kind, message } = explain(failure)
+      setCreation(id, { sending: false, message, refused: kind === 'refused' })
     }
   }
 
   /** Changes an observation; shown at once, sent behind it. */
   function edit(givenId: string, patch: ObservationPatch) {
     const id = idOf(givenId)
-    setPending(id, { patch: { ...pending.value.get(id)?.patch, ...patch }, message: '' })
+    setPending(id, { patch: { ...pending.value.get(id)?.patch, ...patch }, message: '', refused: false })
     void send(id)
   }
 
@@ -124,7 +125,7 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
       void send(id)
     } catch (failure) {
       const { kind, message, theirs } = explain(failure)
-      setPending(id, { sending: false, message, clash: kind === 'stale' && theirs ? theirs : null })
+      setPending(id, { sending: false, message, refused: kind === 'refused', clash: kind === 'stale' && theirs ? theirs : null })
     }
   }
 
@@ -139,10 +140,10 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
     void send(id)
   }
 
-  /** Sends everything that is still here. */
-  function sendAll() {
-    for (const { id } of creations.value) void sendCreation(id)
-    for (const id of pending.value.keys()) void send(id)
+  /** Sends everything that is still here. By itself it never repeats what the server refused: only a person does. */
+  function sendAll({ byItself = false } = {}) {
+    for (const { id, refused } of creations.value) if (!(byItself && refused)) void sendCreation(id)
+    for (const [id, { refused }] of pending.value) if (!(byItself && refused)) void send(id)
   }
   /** Gives up a change the server will not take; the observation goes back to what is stored. */
   function giveUp(givenId: string) {
@@ -171,21 +172,22 @@ export function useObservations({ server, explain, storageKey, sampleNumber, me,
   const storage = deviceStorage(storageKey)
   const kept = storage.read()
   creations.value = kept.creations
-  pending.value = new Map(kept.patches.map(([id, patch, base]) => [id, { patch, base, sending: false, message: '', clash: null }]))
+  pending.value = new Map(kept.patches.map(([id, patch, base]) => [id, { patch, base, sending: false, message: '', refused: false, clash: null }]))
   watch([creations, pending], () => storage.write(
     creations.value, [...pending.value].map(([id, { patch, base }]): KeptPatch => [id, patch, base]),
   ), { flush: 'sync' })
-  const timer = setInterval(() => { if (waitingCount.value > 0 && saveState.value !== 'clash') sendAll() }, retryMs)
-  globalThis.addEventListener?.('online', sendAll)
+  const timer = setInterval(() => { if (waitingCount.value > 0 && saveState.value !== 'clash') sendAll({ byItself: true }) }, retryMs)
+  const backOnline = () => sendAll({ byItself: true })
+  globalThis.addEventListener?.('online', backOnline)
   onScopeDispose(() => {
     clearInterval(timer)
-    globalThis.removeEventListener?.('online', sendAll)
+    globalThis.removeEventListener?.('online', backOnline)
   })
 
   return {
     observations, saveState, waitingCount, clashes, add, edit, settleClash, sendAll, giveUp, isOnlyHere, idOf, messageFor, place,
     /** the server's list, as read */
-    receive: (list: readonly FittingObservation[]) => { stored.value = list; sendAll() },
+    receive: (list: readonly FittingObservation[]) => { stored.value = list; sendAll({ byItself: true }) },
     forget: (id: string) => { stored.value = stored.value.filter((one) => one.id !== idOf(id)); setPending(idOf(id), null) },
   }
 }
@@ -209,7 +211,7 @@ function deviceStorage(key: string) {
     read(): Kept {
       try {
         const kept = JSON.parse(localStorage.getItem(key) ?? 'null') as Kept | null
-        return { creations: (kept?.creations ?? []).map((one) => ({ ...one, sending: false, message: '' })), patches: kept?.patches ?? [] }
+        return { creations: (kept?.creations ?? []).map((one) => ({ ...one, sending: false, message: '', refused: false })), patches: kept?.patches ?? [] }
       } catch {
         return { creations: [], patches: [] } // an unreadable store is no reason to keep the fitting shut
       }

@@ -126,6 +126,24 @@ describe('observations', () => {
     expect(store.observations.value[0]).toMatchObject({ note: 'hers', version: 5, unsent: false })
   })
 
+  it('do not bounce: what the server refused is sent again only by hand', async () => {
+    let calls = 0
+    const { store } = open({ update: async () => { calls++; throw new Refused('refused') } })
+    store.receive([seen()])
+    store.edit('seen-1', { note: 'mine' })
+    await settle()
+    store.receive([seen()])
+    window.dispatchEvent(new Event('online'))
+    await settle()
+    expect(calls).toBe(1)
+    expect(store.messageFor('seen-1')).toBe('refused.')
+    store.sendAll()
+    await settle()
+    expect(calls).toBe(2)
+    store.giveUp('seen-1')
+    expect(store.observations.value[0]).toMatchObject({ note: '', unsent: false })
+  })
+
   it('show an observation let be before the server says so', () => {
     const { store } = open({ update: () => new Promise(() => {}) })
     store.receive([seen()])
