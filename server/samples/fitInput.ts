@@ -47,7 +47,8 @@ function ledgerBefore(state: ProjectState, sample: SampleRow): LedgerEntry[] {
   const entries = new Map<string, LedgerEntry & { readings: LedgerEntry['readings'][number][] }>()
   for (const change of state.changes.filter((one) => goesToPaper(one) && one.cause && one.carriedTo !== null && one.carriedTo <= sample.number)) {
     const key = `${change.cause}~${change.side}`
-    const entry = entries.get(key) ?? { cause: change.cause!, side: change.side, amountMm: 0, readings: [] }
+    const entry = entries.get(key) ?? { cause: change.cause!, side: change.side, amountMm: 0, unreadMm: 0, readings: [] }
+    const readBefore = entry.readings.length
     entry.amountMm += change.amountMm
     for (const prediction of change.predictions) {
       const observation = state.observations.find(({ id }) => id === prediction.observationId)
@@ -59,6 +60,8 @@ function ledgerBefore(state: ProjectState, sample: SampleRow): LedgerEntry[] {
       if (!earlier || after === null) continue
       entry.readings.push({ observationId: observation.id, sign: observation.sign, zone: observation.zone, beforeMm: clothOf(earlier), afterMm: after, predictedMm: prediction.changeMm })
     }
+    // A look at the sample sees everything sewn into it, earlier changes too.
+    entry.unreadMm = entry.readings.length > readBefore ? 0 : (entry.unreadMm ?? 0) + change.amountMm
     entries.set(key, entry)
   }
   return [...entries.values()]

@@ -1,4 +1,5 @@
 import { paperStepMm } from '../units/unit.ts'
+import { leastChangeMm } from './amount.ts'
 import { type Diagnosis, type Finding, type FitInput, type Observation } from './types.ts'
 import { type Candidate, gatherCandidates, observationColumn } from './reasoning/candidates.ts'
 import { contradictoryChanges, contradictoryObservations } from './reasoning/conflicts.ts'
@@ -23,7 +24,7 @@ export function diagnose(input: FitInput, index: RuleIndex = catalogueIndex): Di
   const contradicted = new Set(contradictions.flatMap(({ observationIds }) => observationIds))
   const ledger = mergeEntries(input.ledger).flatMap((entry) => (index.byCause.has(entry.cause) ? [ledgerState(entry, index.byCause.get(entry.cause)!)] : []))
 
-  const overdone = ledger.filter(({ status }) => status === 'overdone').map((state) => ({ state, reversed: input.observations.filter((one) => !contradicted.has(one.id) && isReversed(state, one)) }))
+  const overdone = ledger.filter(({ status, doneMm }) => status === 'overdone' && doneMm >= leastChangeMm).map((state) => ({ state, reversed: input.observations.filter((one) => !contradicted.has(one.id) && isReversed(state, one)) }))
   const accounted = new Set(overdone.flatMap(({ reversed }) => reversed.map(({ id }) => id)))
   const seen = pairSides(input.observations.filter(({ id }) => !contradicted.has(id) && !accounted.has(id)))
 
@@ -35,7 +36,7 @@ export function diagnose(input: FitInput, index: RuleIndex = catalogueIndex): Di
   const again = overdone.map(({ state, reversed }) => ({ state, reversed: [...reversed, ...cover.chosen.filter((candidate) => isOpposite(state, candidate)).flatMap((candidate) => explainedOf(candidate, context))] }))
   const fresh = cover.chosen.filter((candidate) => !overdone.some(({ state }) => isOpposite(state, candidate)))
   const back = [
-    ...ledger.filter(({ status }) => status === 'worse').map((state) => bringBackFinding(state, context)),
+    ...ledger.filter(({ status, doneMm }) => status === 'worse' && doneMm >= leastChangeMm).map((state) => bringBackFinding(state, context)),
     ...again.map(({ state, reversed }) => overdoneFinding(state, -state.remainingMm, reversed, context)),
   ]
   const suggested = fresh.map((candidate) => takenTooFar(candidate, context) ?? findingOf(candidate, context))

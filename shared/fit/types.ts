@@ -85,6 +85,8 @@ export type LedgerEntry = {
   /** whole amount on the body put into the paper so far, signed as the rule's change is */
   amountMm: number
   side: Side
+  /** the part of `amountMm` that is sewn in but was not looked at on a sample yet, signed; left out: none of it */
+  unreadMm?: number
   /** every sample this change was looked at on, oldest first */
   readings: readonly LedgerReading[]
 }
@@ -95,7 +97,7 @@ export type LedgerReading = {
   /** what the observation measured before and after, cloth in mm, positive as first seen; negative after = reversed */
   beforeMm: number
   afterMm: number
-  /** what the change was predicted to take away, cloth in mm, > 0 */
+  /** what the change was predicted to take away (`changeMm` of the prediction, in proportion where another amount was put in), cloth in mm, > 0 */
   predictedMm: number
 }
 

@@ -64,7 +64,7 @@ type Answered = { mm: number; from: Finding['change']['amountFrom']; remainingMm
 function answerOf(whole: Whole, state: LedgerState | undefined, stepMm: number): Answered {
   if (!state) return whole
   const soFarMm = state.doneMm
-  if (!state.reading) return { ...whole, response: { value: 1, soFarMm, text: `${mmToken(soFarMm)} is in the sample already; it was not looked at again before.` } }
+  if (!state.reading || state.status === 'not-looked') return { ...whole, response: { value: state.response, soFarMm, text: `${mmToken(soFarMm)} is in the sample already; this is the first look at it.` } }
   const remainingMm = whole.from === 'measured on sample' ? whole.mm : state.remainingMm
   const mm = roundToStep(remainingMm / state.response, stepMm)
   const { beforeMm, afterMm, predictedMm } = state.reading
@@ -112,7 +112,7 @@ export function overdoneFinding(state: LedgerState, overshootMm: number, explain
     explains: explained.map(({ id }) => id),
     because: [{ text, speaks: 'for', strength: 'decisive', from: { ledger: rule.cause } }],
     rivals: [], change,
-    predicts: explained.map(({ id }) => ({ observationId: id, text: rule.predicts, expectedMm: 0, changeMm: backMm })),
+    predicts: [...new Set([...(state.reading ? [state.reading.observationId] : []), ...explained.map(({ id }) => id)])].map((observationId) => ({ observationId, text: rule.predicts, expectedMm: 0, changeMm: backMm })),
     response: { value: state.response, soFarMm: doneMm, text }, advice: 'change',
   }
 }

@@ -28,7 +28,7 @@ export function mergeEntries(entries: readonly LedgerEntry[]): LedgerEntry[] {
   for (const entry of entries) {
     const key = `${entry.cause} ${sideOfEntry(entry.side)}`
     const known = merged.get(key)
-    merged.set(key, known ? { ...known, amountMm: known.amountMm + entry.amountMm, readings: [...known.readings, ...entry.readings] } : entry)
+    merged.set(key, known ? { ...known, amountMm: known.amountMm + entry.amountMm, unreadMm: (known.unreadMm ?? 0) + (entry.unreadMm ?? 0), readings: [...known.readings, ...entry.readings] } : entry)
   }
   return [...merged.values()]
 }
@@ -40,7 +40,10 @@ export function ledgerState(entry: LedgerEntry, rule: Rule): LedgerState {
   const main = chains[0]
   const last = main?.at(-1)
   if (!last) return { ...known, status: 'not-looked', response: 1, remainingMm: 0, reading: null }
-  return { ...known, status: statusOf(main![0]!, last), response: pooledResponse(chains), remainingMm: last.afterMm, reading: last }
+  const seen = statusOf(main![0]!, last)
+  // What was put in or taken back since the last look makes that reading old. That a change made it worse stays true of its cause.
+  const status = seen !== 'worse' && Math.abs(entry.unreadMm ?? 0) > 0 ? 'not-looked' : seen
+  return { ...known, status, response: pooledResponse(chains), remainingMm: last.afterMm, reading: last }
 }
 
 /** Worse is told from the last sample alone; hardly answered only where all the samples together moved nothing. */

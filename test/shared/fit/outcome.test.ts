@@ -68,3 +68,20 @@ describe('worse after a change', () => {
     expect(findings[1]!.because.some(({ from }) => 'ledger' in from)).toBe(true)
   })
 })
+
+describe('a change that was not looked at yet', () => {
+  const index = catalogueOf(rule('hip-tight', { opposite: 'hip-loose' }))
+  const first: LedgerReading = { observationId: 'hip', sign: 'tight', zone: 'hip', beforeMm: 20, afterMm: 6, predictedMm: 20 }
+  it('is not asked for twice', () => {
+    expect(diagnose(fitting({ ledger: [{ cause: 'hip-tight', amountMm: 29, unreadMm: 9, side: 'both', readings: [first] }] }), index).findings).toEqual([])
+    expect(diagnose(fitting({ ledger: [{ cause: 'hip-tight', amountMm: 12, unreadMm: -8, side: 'both', readings: [{ ...first, afterMm: -8 }] }] }), index).findings).toEqual([])
+  })
+  it('is not brought back twice, and its cause stays refused', () => {
+    const ledger = [{ cause: 'hip-tight', amountMm: 0, unreadMm: -20, side: 'both' as const, readings: [{ ...first, afterMm: 30 }] }]
+    expect(diagnose(fitting({ observations: [seen({ sign: 'tight', zone: 'hip' })], ledger }), index).findings).toEqual([])
+  })
+  it('foretells what goes back, for the sign first seen, so that it is looked at again', () => {
+    const { findings } = diagnose(fitting({ ledger: [{ cause: 'hip-tight', amountMm: 20, side: 'both', readings: [{ ...first, afterMm: -8 }] }] }), index)
+    expect(findings[0]!.predicts).toMatchObject([{ observationId: 'hip', expectedMm: 0, changeMm: 8 }])
+  })
+})
