@@ -24,7 +24,7 @@ export type CallOptions<R extends Route> = Part<R, 'params'> & (R['query'] exten
   idempotencyKey?: string
 }
 
-const lostConnection = 'The connection dropped. What you typed is still here; try again when you are back on the line.'
+const lostConnection = 'The connection dropped. Nothing is lost; try again when you are back on the line.'
 let onSignedOut: () => void = () => {}
 /** The answer cannot be used: usually this page is older than the server that answered. */
 const unreadable = (status: number) => new ApiError(status, 'answer.unreadable', 'The journal answered in a way this page does not know. Load the page again.')
