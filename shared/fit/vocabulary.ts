@@ -68,12 +68,15 @@ export type SignWords = {
 
 const torso = ['neck', 'shoulder', 'upper-back', 'bust', 'armhole', 'sleeve', 'waist', 'midriff', 'abdomen', 'hip', 'seat'] as const
 const legs = ['crotch', 'thigh', 'knee', 'leg'] as const
-const seams = ['centre-front', 'centre-back', 'side-seam', 'front', 'back', 'inseam', 'crotch'] as const
+/** Any seam or line may be named with any sign. */
+const seams: readonly Line[] = ['centre-front', 'centre-back', 'side-seam', 'front', 'back', 'inseam', 'crotch', 'waistband', 'collar', 'cap', 'dart']
+const places: readonly Target[] = ['bust', 'shoulder-tip', 'neck', 'side-seam', 'underarm', 'armhole', 'shoulder-blade', 'waist', 'abdomen', 'hip', 'seat', 'crotch', 'thigh', 'knee', 'elbow', 'hem']
+const ways: readonly Target[] = ['front', 'back', 'up', 'down', 'in', 'out']
 
 export const signWords: Record<Sign, SignWords> = {
   'drag-lines': {
     name: 'Drag lines', hint: 'Taut lines that start or end at one point.', mark: 'drag-line', zones: [...torso, ...legs], directions: ['diagonal', 'horizontal', 'vertical', 'radiating'],
-    targets: ['bust', 'shoulder-tip', 'neck', 'side-seam', 'underarm', 'armhole', 'shoulder-blade', 'waist', 'abdomen', 'hip', 'seat', 'crotch', 'thigh', 'knee', 'elbow', 'hem'], lines: seams,
+    targets: [...places, ...ways], lines: seams,
     asks: [
       { as: 'cloth', ask: 'Open the seam or let the cloth down until the lines drop. How much does it need?' },
       { as: 'fold-depth', ask: 'Pin a fold until the lines drop, then lay it flat. How deep is it?' },
@@ -81,7 +84,7 @@ export const signWords: Record<Sign, SignWords> = {
   },
   gaping: {
     name: 'Stands off', hint: 'An edge that does not lie on the body.', mark: 'gape', zones: ['neck', 'armhole', 'waist', 'bust', 'upper-back', 'hip', 'hem', 'sleeve'], directions: [], targets: [],
-    lines: ['centre-front', 'centre-back', 'side-seam', 'front', 'back', 'waistband', 'collar'],
+    lines: seams,
     asks: [
       { as: 'fold-depth', ask: 'Pinch the edge until it lies on the body. How deep is the fold?' },
       { as: 'gap', ask: 'Let the edges hang as they will. How far apart do they stay?' },
@@ -96,7 +99,7 @@ export const signWords: Record<Sign, SignWords> = {
   },
   binds: {
     name: 'Binds', hint: 'It fits standing still and stops a movement.', mark: 'tight', zones: ['armhole', 'sleeve', 'upper-back', 'neck', 'shoulder', 'crotch', 'thigh', 'knee', 'seat', 'hip', 'waist', 'leg'],
-    directions: [], targets: [], lines: ['front', 'back', 'inseam', 'crotch', 'cap'],
+    directions: [], targets: [], lines: seams,
     asks: [
       { as: 'cloth', ask: 'Open the seam and make the movement. How wide does it open?' },
       { as: 'gap', ask: 'Make the movement. How far apart do the edges stay?' },
@@ -104,7 +107,7 @@ export const signWords: Record<Sign, SignWords> = {
   },
   excess: {
     name: 'Spare cloth', hint: 'Soft folds that can be pinched and pinned out.', mark: 'excess', zones: [...torso, ...legs, 'hem'], directions: ['horizontal', 'vertical', 'diagonal', 'radiating'],
-    targets: ['neck', 'shoulder-tip', 'bust', 'underarm', 'armhole', 'side-seam', 'waist', 'hip', 'seat', 'crotch', 'knee', 'elbow'], lines: seams,
+    targets: places, lines: seams,
     asks: [
       { as: 'fold-depth', ask: 'Pinch the fold flat. How deep is it?' },
       { as: 'cloth', ask: 'Pin out what is spare. How much cloth is it, all told?' },
@@ -112,32 +115,32 @@ export const signWords: Record<Sign, SignWords> = {
   },
   rises: {
     name: 'Rises', hint: 'An edge or seam sits above its place.', mark: 'length', zones: ['hem', 'waist', 'neck', 'bust', 'armhole', 'sleeve', 'hip', 'crotch', 'leg', 'shoulder'], directions: [], targets: [],
-    lines: ['centre-front', 'centre-back', 'side-seam', 'front', 'back', 'waistband'],
+    lines: seams,
     asks: [{ as: 'shift', ask: 'Measure from the edge down to where it should be. How far is it?' }],
   },
   drops: {
     name: 'Drops', hint: 'An edge or seam sits below its place.', mark: 'length', zones: ['hem', 'waist', 'neck', 'shoulder', 'bust', 'armhole', 'sleeve', 'hip', 'crotch', 'seat'], directions: [], targets: [],
-    lines: ['centre-front', 'centre-back', 'side-seam', 'front', 'back', 'waistband'],
+    lines: seams,
     asks: [{ as: 'shift', ask: 'Measure from the edge up to where it should be. How far is it?' }],
   },
   short: {
     name: 'Too short', hint: 'The whole part is too short.', mark: 'length', zones: ['whole', 'sleeve', 'crotch', 'hem', 'leg', 'upper-back', 'bust', 'shoulder', 'midriff', 'waist', 'armhole', 'knee'], directions: [], targets: [],
-    lines: ['centre-front', 'centre-back', 'side-seam', 'front', 'back', 'inseam', 'crotch'],
+    lines: seams,
     asks: [{ as: 'cloth', ask: 'Measure on to where it should end. How much longer must it be?' }, { as: 'gap', ask: 'How far is it from reaching its place?' }],
   },
   long: {
     name: 'Too long', hint: 'The whole part is too long.', mark: 'length', zones: ['whole', 'sleeve', 'crotch', 'hem', 'leg', 'upper-back', 'bust', 'shoulder', 'midriff', 'waist', 'armhole', 'knee'], directions: [], targets: [],
-    lines: ['centre-front', 'centre-back', 'side-seam', 'front', 'back', 'inseam', 'crotch'],
+    lines: seams,
     asks: [{ as: 'cloth', ask: 'Measure back to where it should end. How much shorter must it be?' }, { as: 'fold-depth', ask: 'Pin a fold across and lay it flat. How deep is it?' }],
   },
   swings: {
     name: 'Swings', hint: 'A seam or the grain leaves the plumb line.', mark: 'balance', zones: ['hip', 'leg', 'hem', 'sleeve', 'whole', 'waist', 'bust', 'upper-back', 'knee', 'thigh'], directions: [], targets: ['front', 'back', 'in', 'out'],
-    lines: ['side-seam', 'centre-front', 'centre-back', 'inseam'],
+    lines: seams,
     asks: [{ as: 'shift', ask: 'Hold a plumb line at the top of the seam. How far off is the seam at the bottom?' }],
   },
   'off-place': {
     name: 'Off its place', hint: 'A dart point, seam or pocket sits somewhere else.', mark: 'place', zones: ['bust', 'shoulder', 'waist', 'neck', 'armhole', 'sleeve', 'hip', 'seat', 'knee', 'upper-back', 'abdomen', 'crotch', 'midriff'], directions: [],
-    targets: ['up', 'down', 'in', 'out', 'front', 'back'], lines: ['dart', 'centre-front', 'centre-back', 'side-seam', 'front', 'back', 'inseam', 'cap', 'collar', 'waistband', 'crotch'],
+    targets: ['up', 'down', 'in', 'out', 'front', 'back'], lines: seams,
     asks: [{ as: 'shift', ask: 'Measure from where it is to where it belongs. How far is it?' }],
   },
 }

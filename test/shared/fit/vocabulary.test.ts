@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest'
+import { rules } from '#shared/fit/catalogue.ts'
 import { amountKinds, directions, lines, sides, signs, targets, views, zones } from '#shared/fit/types.ts'
 import {
   amountKindWords, askFor, clothMm, directionWords, isOffered, lineWords, placeOf, sentenceOf, sideWords, signWords, signsAt, signsOfMark, targetWords,
@@ -61,4 +62,16 @@ describe('sharper sentences', () => {
 it('counts twice the depth of a pinched fold as cloth, and every other amount as it is', () => {
   expect(clothMm({ mm: 8, as: 'fold-depth' })).toBe(16)
   for (const as of ['cloth', 'gap', 'shift'] as const) expect(clothMm({ mm: 8, as })).toBe(8)
+})
+
+describe('the rules', () => {
+  const list = <T>(one: T | readonly T[] | undefined): readonly T[] => (one === undefined ? [] : Array.isArray(one) ? one as readonly T[] : [one as T])
+  it('use no sign, zone, target, direction or line that has no words, and no amount the editor cannot ask for', () => {
+    for (const rule of rules) for (const pattern of rule.signs) for (const sign of list(pattern.sign)) {
+      for (const zone of list(pattern.zone)) expect(sentenceOf({ sign, zone }), `${rule.cause}: ${sign} at ${zone}`).toBeTruthy()
+      for (const target of list(pattern.towards)) expect(signWords[sign].targets, `${rule.cause}: ${sign} towards ${target}`).toContain(target)
+      for (const direction of list(pattern.direction)) expect(signWords[sign].directions, `${rule.cause}: ${sign} ${direction}`).toContain(direction)
+      for (const line of list(pattern.line)) expect(signWords[sign].lines, `${rule.cause}: ${sign} at the ${line}`).toContain(line)
+    }
+  })
 })
