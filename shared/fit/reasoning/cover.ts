@@ -4,6 +4,8 @@ import { areRivals, type Candidate } from './candidates.ts'
 const causeCost = 6
 /** What leaving an observation unexplained costs. With the cost of a cause: a lone fair sign is enough, a lone slight one is not. */
 const openCost = 3
+/** Up to this many candidates every set is tried: 2⁹ are 512. */
+const mostForAll = 9
 /** Two causes are tried together up to this many candidates; a fitting of six observations seldom has more worth trying. */
 const mostForPairs = 40
 
@@ -15,8 +17,8 @@ export type Cover = {
 
 /**
  * The fewest causes that explain what was seen: the set of candidates with the greatest sum of what each column is explained by,
- * less the cost of each cause. Begins with nothing and goes on adding (one, or two together), exchanging and dropping while that
- * helps. Equal sets are told apart by the catalogue's order, never by the order of the observations.
+ * less the cost of each cause. Few candidates are tried in every set; with more it begins with nothing and goes on adding (one, or two
+ * together), exchanging and dropping while that helps. Equal sets are told apart by the catalogue's order, never by the order of the observations.
  */
 export function coverObservations(candidates: readonly Candidate[]): Cover {
   const table = tabulate(withoutOutdone([...candidates].sort((a, b) => ownPoints(b) - ownPoints(a) || a.place - b.place || (a.side < b.side ? -1 : 1))))
@@ -25,13 +27,14 @@ export function coverObservations(candidates: readonly Candidate[]): Cover {
   const improve = (tries: Iterable<readonly number[]>): boolean => {
     const before = bestValue
     for (const next of tries) {
-      const pruned = prune(next, table)
-      const value = valueOf(pruned, table)
-      if (value > bestValue) [best, bestValue] = [pruned, value]
+      const [set, value] = slim(next, table)
+      if (value > bestValue) [best, bestValue] = [set, value]
     }
     return bestValue > before
   }
-  while (improve(neighbours(best, table.list.length)) || improve(withPairs(best, table.list.length)));
+  const count = table.list.length
+  if (count <= mostForAll) improve(everySet(count))
+  else while (improve(neighbours(best, count)) || improve(withPairs(best, count)));
   const by = explainers(best, table)
   const explainedBy = new Map<string, Candidate>()
   table.columns.forEach((column, i) => { if (by[i]! >= 0) explainedBy.set(column, table.list[by[i]!]!) })
@@ -62,6 +65,12 @@ function tabulate(list: readonly Candidate[]): Table {
     list, columns, isSeen: columns.map((column) => column.startsWith('seen ')), bonus: list.map((candidate) => candidate.bonus),
     rows: list.map((candidate) => Int32Array.from(columns, (column) => candidate.columns.get(column) ?? 0)),
   }
+}
+
+/** Smaller numbers first: of equal sets the one with the stronger candidates is met first. */
+function* everySet(count: number): Generator<readonly number[]> {
+  const all = Array.from({ length: count }, (_, i) => i)
+  for (let bits = 1; bits < 2 ** count; bits++) yield all.filter((i) => bits & (1 << i))
 }
 
 const outsideOf = (set: readonly number[], count: number): number[] => Array.from({ length: count }, (_, i) => i).filter((i) => !set.includes(i))
@@ -109,6 +118,22 @@ function prune(set: readonly number[], table: Table): readonly number[] {
   }
 }
 
+/** A set without the members that cost more than they explain: who comes in may make others not worth their place. */
+function slim(set: readonly number[], table: Table): [readonly number[], number] {
+  let kept = prune(set, table)
+  let value = valueOf(kept, table)
+  for (let slimmer = kept.length > 1; slimmer;) {
+    slimmer = false
+    for (const member of kept) {
+      const without = prune(kept.filter((other) => other !== member), table)
+      const worth = valueOf(without, table)
+      if (worth > value) [kept, value, slimmer] = [without, worth, true]
+    }
+    slimmer &&= kept.length > 1
+  }
+  return [kept, value]
+}
+
 /** A cause with nothing seen for it stands only where its rule allows, and never beside a rival: the measurement was taken once. */
 function earnsItsPlace(member: number, by: Int32Array, set: readonly number[], { list, isSeen }: Table): boolean {
   let explains = false
@@ -125,6 +150,7 @@ function valueOf(set: readonly number[], table: Table): number {
   const by = explainers(set, table)
   let value = 0
   for (let column = 0; column < by.length; column++) if (by[column]! >= 0) value += table.rows[by[column]!]![column]! + (table.isSeen[column] ? openCost : 0)
-  for (const member of set) value += table.bonus[member]! - causeCost
+  // An answer makes a cause free, never more: no cause comes in for its own sake beside one that explains the same.
+  for (const member of set) value += Math.min(table.bonus[member]!, causeCost) - causeCost
   return value
 }
