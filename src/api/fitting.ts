@@ -2,7 +2,7 @@ import {
   createObservation, createOwnChange, decideChange, putAnswer, putReading, readFitting, removeObservation, removeReading, restoreObservation, startSample,
   takeBackChange, updateChange, updateObservation, updateSample,
 } from '#shared/contracts/fitting.ts'
-import { type PhotographSize, readPhotographFile, removePhotograph, restorePhotograph, updatePhotograph, uploadPhotograph } from '#shared/contracts/photograph.ts'
+import { removePhotograph, restorePhotograph, updatePhotograph, uploadPhotograph } from '#shared/contracts/photograph.ts'
 import { createComment, listComments } from '#shared/contracts/project.ts'
 import { type RouteInput } from '#shared/contracts/route.ts'
 import { call } from './call.ts'
@@ -45,6 +45,4 @@ export function fittingApi(projectId: string, number: number) {
 }
 export type FittingApi = ReturnType<typeof fittingApi>
 
-/** Address of a photograph in one of its three sizes. */
-export const photographUrl = (projectId: string, photographId: string, size: PhotographSize): string =>
-  readPhotographFile.path.replace(':projectId', projectId).replace(':photographId', photographId).replace(':size', size)
+export { photographUrl } from './photographUrl.ts'

@@ -1,4 +1,5 @@
 import { createRouter, createWebHistory } from 'vue-router'
+import RailView from '@/views/RailView.vue'
 import { watchTheDoor } from './watchTheDoor.ts'
 
 declare module 'vue-router' {
@@ -19,7 +20,8 @@ export const router = createRouter({
   history: createWebHistory(),
   scrollBehavior: (_to, _from, saved) => saved ?? { top: 0 },
   routes: [
-    { path: '/', component: () => import('@/views/RailView.vue'), meta: { title: 'On the rail' } },
+    // The rail comes with the first script: it is where nearly every visit begins, and a script of its own would be one more wait.
+    { path: '/', component: RailView, meta: { title: 'On the rail' } },
     { path: '/new', component: () => import('@/views/NewGarmentView.vue'), meta: { title: 'Hang a new garment' } },
     { path: '/people', component: () => import('@/views/PeopleView.vue'), meta: { title: 'People' } },
     { path: '/people/:id/measurements', component: () => import('@/views/WearerView.vue'), props: true, meta: { title: 'Measurements' } },

@@ -7,8 +7,9 @@ import { useSessionStore } from '@/stores/session.ts'
 export function watchTheDoor(router: Router): void {
   router.beforeEach(async (to) => {
     const session = useSessionStore()
+    const asked = session.wasIn || !to.meta.open ? session.load() : null
     if (session.wasIn || to.meta.open) fetchAhead(to)
-    if (session.wasIn || !to.meta.open) await session.load()
+    await asked
     if (to.meta.open) return session.me && to.path === '/sign-in' ? '/' : true
     if (session.away) return true
     return session.me ? true : { path: '/sign-in', query: to.fullPath === '/' ? {} : { next: to.fullPath } }
