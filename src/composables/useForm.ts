@@ -17,7 +17,10 @@ export function useForm<T>(send: () => Promise<T>) {
     } catch (failure) {
       problem.value = failure instanceof Error ? failure.message : 'This did not reach the journal.'
       if (failure instanceof ApiError && failure.code === 'request.invalid') {
-        fields.value = Object.fromEntries(Object.entries(failure.details).filter((entry): entry is [string, string] => typeof entry[1] === 'string'))
+        const refused = Object.entries(failure.details).filter((entry): entry is [string, string] => typeof entry[1] === 'string')
+        fields.value = Object.fromEntries(refused)
+        // The server names fields as programs do; the form shows each sentence at its field.
+        if (refused.length) problem.value = refused.length === 1 ? 'Check what is marked below.' : 'Check the fields marked below.'
       }
       return undefined
     } finally {

@@ -41,7 +41,9 @@ export const router = createRouter({
     { path: '/sign-in', component: () => import('@/views/SignInView.vue'), meta: { bare: true, open: true, title: 'Sign in' } },
     { path: '/sign-up', component: () => import('@/views/SignUpView.vue'), meta: { bare: true, open: true, title: 'Make an account' } },
     { path: '/reset', component: () => import('@/views/ResetRequestView.vue'), meta: { bare: true, open: true, title: 'A new password' } },
-    { path: '/reset/:token', component: () => import('@/views/ResetView.vue'), props: true, meta: { bare: true, open: true, title: 'A new password' } },
+    // The token of the link stands behind the #, where no server and no log sees it.
+    { path: '/reset-password', component: () => import('@/views/ResetView.vue'), props: (route) => ({ token: route.hash.slice(1) }), meta: { bare: true, open: true, title: 'A new password' } },
+    { path: '/reset/:token', redirect: ({ params }) => ({ path: '/reset-password', hash: `#${String(params.token)}` }) },
     { path: '/:rest(.*)*', component: () => import('@/views/NotFoundView.vue'), meta: { title: 'Nothing here' } },
   ],
 })
