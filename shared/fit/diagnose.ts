@@ -18,7 +18,9 @@ import { wholeAmount } from './reasoning/wholeAmount.ts'
  * @param index - the rules, indexed; the whole catalogue unless a test asks for fewer
  * @returns findings in working order; lengths in mm, texts with amount tokens (see types.ts)
  */
-export function diagnose(input: FitInput, index: RuleIndex = catalogueIndex): Diagnosis {
+export function diagnose(given: FitInput, index: RuleIndex = catalogueIndex): Diagnosis {
+  // One order for everything that follows, whatever order things were noted in.
+  const input = { ...given, observations: [...given.observations].sort((a, b) => (a.id < b.id ? -1 : 1)) }
   const stepMm = paperStepMm[input.unit ?? 'cm']
   const contradictions = contradictoryObservations(input.observations)
   const contradicted = new Set(contradictions.flatMap(({ observationIds }) => observationIds))

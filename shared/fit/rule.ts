@@ -75,7 +75,7 @@ export type MeasurePattern = {
   grades: readonly { from?: number; below?: number; weight: Strength; against?: true }[]
   /** factor from the value to the whole amount (unsigned); left out: it gives no amount */
   amount?: number
-  /** raises the cause even where nothing was seen on the sample */
+  /** raises the cause even where other things were seen on the sample and this was not; before the first look every measurement that gives an amount does */
   alone?: true
   /** the reason with `{value}` for the value: "the full bust is {value} more than this pattern allows for" */
   because: string

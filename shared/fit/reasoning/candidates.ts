@@ -45,12 +45,15 @@ export function gatherCandidates(input: FitInput, seen: readonly Seen[], ledger:
     const { facts, missing } = measureEvidence(rule, input, (side) => done.filter((state) => state.side === side).reduce((sum, state) => sum + state.doneMm, 0))
     if (missing.length) missingFor.set(rule.cause, missing)
     for (const side of sidesFor(rule, signs ?? [], facts, done)) {
-      const candidate = candidateOf(rule, side, signs ?? [], facts.filter((fact) => fact.side === side || rule.sided !== 'one' && fact.side === 'both'), answers.get(rule.cause) ?? [], ledger, index)
+      const candidate = candidateOf(rule, side, signs ?? [], facts.filter((fact) => fact.side === side || rule.sided !== 'one' && fact.side === 'both'), answers.get(rule.cause) ?? [], ledger, index, isFirstLook(input))
       if (candidate) candidates.push(candidate)
     }
   }
   return { candidates, missingFor }
 }
+
+/** Before anything was looked at, every measurement that gives an amount may speak alone; afterwards the sample is the better witness. */
+const isFirstLook = ({ observations, ledger }: FitInput): boolean => !observations.length && !ledger.length
 
 type RuleMatch = { seen: Seen; pattern: SignPattern; strength: Strength }
 
@@ -98,7 +101,7 @@ function answersByCause(input: FitInput, index: RuleIndex): Map<string, Answer[]
   return byCause
 }
 
-function candidateOf(rule: Rule, side: CandidateSide, signs: readonly RuleMatch[], facts: readonly MeasureFact[], answers: readonly Answer[], ledger: readonly LedgerState[], index: RuleIndex): Candidate | null {
+function candidateOf(rule: Rule, side: CandidateSide, signs: readonly RuleMatch[], facts: readonly MeasureFact[], answers: readonly Answer[], ledger: readonly LedgerState[], index: RuleIndex, firstLook: boolean): Candidate | null {
   const matches = new Map<string, SignMatch>()
   const refusals = new Map<string, Evidence & { points: number }>()
   const aside: Evidence[] = []
@@ -136,7 +139,7 @@ function candidateOf(rule: Rule, side: CandidateSide, signs: readonly RuleMatch[
     aside.push(told.evidence)
   }
   if (!columns.size) return null
-  const alone = facts.some((fact) => fact.pattern.alone && !fact.against) || [...columns.keys()].some((column) => column.startsWith('ledger '))
+  const alone = facts.some((fact) => !fact.against && (fact.pattern.alone || (firstLook && fact.pattern.amount !== undefined))) || [...columns.keys()].some((column) => column.startsWith('ledger '))
   return { rule, side, place: index.placeOf.get(rule.cause)!, columns, bonus, matches, facts, aside, alone }
 }
 

@@ -12,8 +12,7 @@ const opposites: readonly (readonly [Sign, Sign])[] = [['tight', 'excess'], ['sh
 /** Signs that contradict each other at the same zone, side and view. They are left out of the reasoning until one is taken back. */
 export function contradictoryObservations(observations: readonly Observation[]): Conflict[] {
   const conflicts: Conflict[] = []
-  const sorted = [...observations].sort((a, b) => (a.id < b.id ? -1 : 1))
-  for (const [i, a] of sorted.entries()) for (const b of sorted.slice(i + 1)) {
+  for (const [i, a] of observations.entries()) for (const b of observations.slice(i + 1)) {
     if (!contradict(a, b)) continue
     conflicts.push({
       observationIds: [a.id, b.id],

@@ -23,8 +23,7 @@ const mostUnseen = 0.5
 export function findingOf(candidate: Candidate, context: FindingContext): Finding {
   const { input, cover, candidates, stepMm, index } = context
   const { rule, side } = candidate
-  // Sorted, so that the answer does not depend on the order things were noted in.
-  const explained = input.observations.filter(({ id }) => cover.explainedBy.get(observationColumn(id)) === candidate).sort((a, b) => (a.id < b.id ? -1 : 1))
+  const explained = input.observations.filter(({ id }) => cover.explainedBy.get(observationColumn(id)) === candidate)
   const whole = wholeAmount(candidate, explained, stepMm)
   const state = context.ledger.find((one) => one.entry.cause === rule.cause && one.side === side)
   const answered = answerOf(whole, state, stepMm)

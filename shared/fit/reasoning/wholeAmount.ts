@@ -44,7 +44,7 @@ const mean = (values: readonly number[]): number => values.reduce((sum, value) =
 /** Wholes from the strongest signs that were measured; signs as strong as each other are averaged, weaker ones are left aside. */
 function fromSample(candidate: Candidate, explained: readonly Observation[], traces: Map<string, string>): number[] {
   const wholes: { mm: number; weight: number }[] = []
-  for (const observation of [...explained].sort((a, b) => (a.id < b.id ? -1 : 1))) {
+  for (const observation of explained) {
     const match = candidate.matches.get(observation.id)
     const whole = match && wholeFrom(observation, match, candidate)
     if (!whole) continue
