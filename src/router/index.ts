@@ -18,7 +18,8 @@ const sampleProps = (route: { params: Record<string, string | string[]> }) => ({
 
 export const router = createRouter({
   history: createWebHistory(),
-  scrollBehavior: (_to, _from, saved) => saved ?? { top: 0 },
+  // A filter in the address is the same page; the first page stands at its top already.
+  scrollBehavior: (to, from, saved) => saved ?? (from.matched.length && to.path !== from.path ? { top: 0 } : false),
   routes: [
     // The rail comes with the first script: it is where nearly every visit begins, and a script of its own would be one more wait.
     { path: '/', component: RailView, meta: { title: 'On the rail' } },
