@@ -48,7 +48,7 @@ export const legRules: readonly Rule[] = [
     when: trousers, sided: 'either',
     signs: [
       { sign: 'drag-lines', zone: ['leg', 'knee', 'thigh'], towards: ['out', 'knee'], weight: 'fair', because: 'the folds run to the outer knee' },
-      { sign: 'tight', zone: 'knee', towards: 'in', weight: 'strong', because: 'the inner knee is tight', amounts: { cloth: 1 } },
+      { sign: 'tight', zone: 'knee', weight: 'slight', because: 'the knee is tight', amounts: { cloth: 1 } },
       { sign: 'swings', zone: ['hem', 'leg'], towards: 'out', weight: 'strong', because: 'the hem swings out', amounts: { shift: 1 }, after: 'The leg hangs straight.' },
       { sign: 'swings', zone: ['hem', 'leg'], towards: 'in', weight: 'decisive', against: true, because: 'a hem that swings in is the reverse of it' },
     ],
@@ -67,7 +67,7 @@ export const legRules: readonly Rule[] = [
     when: trousers, sided: 'either',
     signs: [
       { sign: 'drag-lines', zone: ['leg', 'knee', 'thigh'], towards: 'in', weight: 'fair', because: 'the folds run to the inner knee' },
-      { sign: 'tight', zone: 'knee', towards: 'out', weight: 'strong', because: 'the outer knee is tight', amounts: { cloth: 1 } },
+      { sign: 'tight', zone: 'knee', weight: 'slight', because: 'the knee is tight', amounts: { cloth: 1 } },
       { sign: 'swings', zone: ['hem', 'leg'], towards: 'in', weight: 'strong', because: 'the hem swings in', amounts: { shift: 1 }, after: 'The leg hangs straight.' },
       { sign: 'swings', zone: ['hem', 'leg'], towards: 'out', weight: 'decisive', against: true, because: 'a hem that swings out is the reverse of it' },
     ],

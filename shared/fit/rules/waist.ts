@@ -14,7 +14,7 @@ export const waistRules: readonly Rule[] = [
     signs: [
       { sign: 'short', zone: ['waist', 'midriff', 'whole'], weight: 'decisive', because: 'the bodice ends above the waist', amounts: { shift: 1, gap: 1, cloth: 1 }, after: 'The waist shaping lies at the waist.' },
       { sign: 'rises', zone: 'waist', weight: 'fair', because: 'the waist lies above its place', amounts: { shift: 1 } },
-      { sign: 'off-place', zone: 'waist', towards: 'up', weight: 'strong', because: 'the waist seam lies above the waist', amounts: { shift: 1 }, after: 'The waist seam lies at the waist.' },
+      { sign: 'off-place', zone: 'waist', towards: 'down', weight: 'strong', because: 'the waist seam has to come down to the waist', amounts: { shift: 1 }, after: 'The waist seam lies at the waist.' },
       { sign: 'rises', zone: 'waist', line: 'centre-front', weight: 'fair', against: true, because: 'a waist that rises in front alone is not short all round' },
       { sign: 'excess', zone: 'waist', direction: 'horizontal', weight: 'strong', against: true, because: 'folds across at the waist are spare length' },
     ],
@@ -216,12 +216,13 @@ export const waistRules: readonly Rule[] = [
     sentence: 'The skirt is too wide at waist and hip.',
     recognise: 'The skirt slips down, sits below its place and its hem hangs uneven.',
     words: ['slips down', 'too big all round', 'skirt turns'],
-    when: { kinds: ['skirt', 'dress', 'trousers'] }, sided: 'both',
+    when: { kinds: ['skirt', 'dress', 'trousers'], waist: ['fitted', 'none'] }, sided: 'both',
     signs: [
-      { sign: 'drops', zone: ['waist', 'whole'], weight: 'decisive', because: 'nothing holds it at the waist', amounts: {}, after: 'It stays at the waist.' },
+      { sign: 'drops', zone: ['waist', 'whole'], weight: 'strong', because: 'nothing holds it at the waist', amounts: {}, after: 'It stays at the waist.' },
       { sign: 'excess', zone: 'hip', direction: 'vertical', weight: 'fair', because: 'the hip is loose too', amounts: { 'fold-depth': 1, cloth: 1 } },
       { sign: 'drops', zone: 'hem', weight: 'slight', because: 'the hem hangs uneven' },
       { sign: 'tight', zone: ['hip', 'waist'], weight: 'decisive', against: true, because: 'what is tight does not slip' },
+      { sign: 'drops', zone: 'waist', view: ['back', 'front'], line: ['centre-back', 'centre-front'], weight: 'strong', against: true, because: 'a waist pulled down at one place is short there' },
     ],
     measures: [],
     amounts: { direction: -1, usualMm: [20, 32, 48] },
@@ -408,7 +409,7 @@ export const waistRules: readonly Rule[] = [
     words: ['waist shaping too high', 'one-piece dress waist'],
     when: { kinds: ['dress', 'shirt', 'jacket', 'coat'], without: ['waist-seam'] }, sided: 'both',
     signs: [
-      { sign: 'off-place', zone: 'waist', towards: 'up', weight: 'fair', because: 'the shaping lies above the waist', amounts: { shift: 1 } },
+      { sign: 'off-place', zone: 'waist', towards: 'down', weight: 'fair', because: 'the shaping has to come down to the waist', amounts: { shift: 1 } },
       { sign: 'tight', zone: 'midriff', weight: 'slight', because: 'the narrowest part lies on the ribs' },
       { sign: 'short', zone: ['hem', 'whole'], weight: 'fair', against: true, because: 'a garment that is short as a whole needs length' },
     ],
@@ -438,7 +439,7 @@ export const waistRules: readonly Rule[] = [
     words: ['waist shaping too low'],
     when: { kinds: ['dress', 'shirt', 'jacket', 'coat'], without: ['waist-seam'] }, sided: 'both',
     signs: [
-      { sign: 'off-place', zone: 'waist', towards: 'down', weight: 'fair', because: 'the shaping lies below the waist', amounts: { shift: 1 } },
+      { sign: 'off-place', zone: 'waist', towards: 'up', weight: 'fair', because: 'the shaping has to go up to the waist', amounts: { shift: 1 } },
       { sign: 'excess', zone: 'midriff', direction: 'horizontal', weight: 'fair', because: 'folds lie above the shaping' },
       { sign: 'long', zone: ['hem', 'whole'], weight: 'fair', against: true, because: 'a garment that is long as a whole is shortened' },
     ],
