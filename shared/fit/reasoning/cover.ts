@@ -1,8 +1,9 @@
+import { points } from '../weights.ts'
 import { areRivals, type Candidate } from './candidates.ts'
 
 /** What one more cause costs: more than a fair sign and less than a strong one, so that a cause is not brought in for one vague sign others explain. */
 const causeCost = 6
-/** What leaving an observation unexplained costs. With the cost of a cause: a lone fair sign is enough, a lone slight one is not. */
+/** What leaving an observation open costs. With the cost of a cause: a lone fair sign is enough. A sign that merely fits closes nothing. */
 const openCost = 3
 /** Up to this many candidates every set is tried: 2⁹ are 512. */
 const mostForAll = 9
@@ -149,7 +150,10 @@ function earnsItsPlace(member: number, by: Int32Array, set: readonly number[], {
 function valueOf(set: readonly number[], table: Table): number {
   const by = explainers(set, table)
   let value = 0
-  for (let column = 0; column < by.length; column++) if (by[column]! >= 0) value += table.rows[by[column]!]![column]! + (table.isSeen[column] ? openCost : 0)
+  for (let column = 0; column < by.length; column++) if (by[column]! >= 0) {
+    const strength = table.rows[by[column]!]![column]!
+    value += strength + (table.isSeen[column] && strength >= points.fair ? openCost : 0)
+  }
   // An answer makes a cause free, never more: no cause comes in for its own sake beside one that explains the same.
   for (const member of set) value += Math.min(table.bonus[member]!, causeCost) - causeCost
   return value

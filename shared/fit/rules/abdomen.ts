@@ -33,6 +33,7 @@ export const abdomenRules: readonly Rule[] = [
       { sign: 'tight', zone: 'abdomen', weight: 'decisive', because: 'the front is strained over the abdomen', amounts: { gap: 1 }, after: 'The front lies easy over the abdomen.' },
       { sign: 'drops', zone: 'waist', view: ['front', 'side'], weight: 'strong', because: 'the front waist is dragged down', amounts: { gap: 1, shift: 1 } },
       { sign: 'gaping', zone: 'hip', view: 'front', weight: 'fair', because: 'the pockets are pulled open in front' },
+      { sign: 'drag-lines', zone: 'crotch', towards: 'hip', weight: 'fair', because: 'the lines run from the crotch up to the hip bones' },
       { sign: 'tight', zone: 'seat', weight: 'fair', against: true, because: 'a back that is tight too asks for width all round' },
     ],
     measures: [], amounts: { direction: 1, usualMm: [8, 15, 25] },

@@ -41,4 +41,25 @@ export const armholeRules: readonly Rule[] = [
     rivals: [{ cause: 'broad-back', check: { ask: 'Does it cut under the arm and not at the sides?', yes: 'The armhole is too high.', no: 'The back lacks width.' } }, { cause: 'bust-girth-tight', check: { ask: 'Is the girth easy at bust level?', yes: 'Only the armhole is high.', no: 'The girth lacks width.' } }],
     drawing: { sign: { figure: 'front', region: box, strokes: [{ kind: 'press', from: [0.34, 0.26], to: [0.38, 0.28] }, { kind: 'fold', from: [0.36, 0.28], to: [0.4, 0.27] }] }, change: { piece: 'bodice-front', marks: [{ kind: 'move', from: [0.92, 0.38], to: [0.92, 0.43], label: 'down' }] } },
   },
+  {
+    cause: 'armhole-low', title: 'Raise the underarm', sentence: 'The armhole is lower under the arm than it needs to be.',
+    recognise: 'Raising the arm lifts the whole garment, and folds lie under the arm at rest.', words: ['low armhole', 'arm lifts the body'],
+    when: { kinds: ['bodice', 'shirt', 'dress', 'jacket', 'coat'], sleeves: ['set-in', 'dropped'] }, sided: 'either',
+    signs: [
+      { sign: 'binds', zone: 'armhole', weight: 'fair', because: 'the raised arm lifts the whole garment', amounts: { shift: 1 } },
+      { sign: 'rises', zone: ['whole', 'hem', 'waist'], weight: 'slight', because: 'the body goes up with the arm' },
+      { sign: 'excess', zone: 'armhole', view: ['front', 'back', 'side'], weight: 'fair', because: 'folds lie under the arm at rest' },
+      { sign: 'drops', zone: 'armhole', weight: 'decisive', because: 'the underarm lies below the arm', amounts: { shift: 1 }, after: 'The arm rises without the body.' },
+      { sign: 'tight', zone: 'armhole', weight: 'strong', against: true, because: 'an edge that cuts is not low' },
+    ],
+    measures: [], amounts: { direction: 1, usualMm: [8, 13, 20] },
+    change: { operation: 'curve-depth', steps: [
+      { piece: 'bodice-front', edge: 'underarm', edges: 1, share: 'length', taper: 'to nothing at the notches', text: 'Raise the underarm of the front by {amount}, blended to the notch.' },
+      { piece: 'bodice-back', edge: 'underarm', edges: 1, share: 'length', taper: 'to nothing at the notches', text: 'Raise the underarm of the back by {amount} alike.' },
+      { piece: 'sleeve', edge: 'underarm', edges: 1, share: 'length', taper: 'to nothing at the notches', text: 'Raise the sleeve’s underarm by {amount} too.' },
+    ], companions: [{ piece: 'lining', text: 'Change the lining alike.', when: { needs: ['lining'] } }], noCompanions: 'body and sleeve move together' },
+    limits: { leastMm: 4, mostMm: 40, beyond: 'Look at cap height and biceps as well.' }, stage: 'bust', predicts: 'The arm rises without the body.', recheck: ['raising the arm', 'cap'], source: 'Home-economics text (take up at underarm or shoulder seam); article on armholes, common practice',
+    rivals: [{ cause: 'full-upper-arm', check: { ask: 'Is the sleeve easy round the arm?', yes: 'The armhole is low.', no: 'The sleeve is narrow.' } }, { cause: 'broad-back', check: { ask: 'Does reaching forward stay easy?', yes: 'Only raising lifts the body.', no: 'The back lacks width.' } }],
+    drawing: { sign: { figure: 'front', region: box, strokes: [{ kind: 'fold', from: [0.34, 0.29], to: [0.4, 0.28] }, { kind: 'level', from: [0.38, 0.36], to: [0.6, 0.35] }] }, change: { piece: 'bodice-front', marks: [{ kind: 'move', from: [0.92, 0.43], to: [0.92, 0.38], label: 'up' }] } },
+  },
 ]

@@ -18,6 +18,7 @@ export const crotchRules: readonly Rule[] = [
       { sign: 'drag-lines', zone: 'crotch', view: 'front', towards: ['hip', 'up'], weight: 'fair', against: true, because: 'lines at the front crotch alone say that the front is short there' },
       { sign: 'drops', zone: 'waist', view: 'back', weight: 'fair', against: true, because: 'a waist that goes down behind alone is short there' },
       { sign: 'drops', zone: 'crotch', weight: 'decisive', against: true, because: 'a crotch that hangs low is not short' },
+      { sign: 'short', zone: 'crotch', line: ['front', 'back'], weight: 'strong', against: true, because: 'what is short in front or behind alone is not a matter of the depth' },
     ],
     measures: [{ plus: ['body:crotch-depth'], minus: ['pattern:crotch-depth'], grades: [{ from: 12, weight: 'strong' }, { from: 5, weight: 'fair' }, { below: -5, weight: 'strong', against: true }], amount: 1, alone: true, because: 'the crotch depth is {value} more than the size is drafted for' }],
     amounts: { direction: 1, usualMm: [8, 14, 22] },
@@ -42,7 +43,7 @@ export const crotchRules: readonly Rule[] = [
     signs: [
       { sign: 'drops', zone: 'crotch', weight: 'decisive', because: 'the crotch hangs below the body', amounts: { shift: 1 }, after: 'The crotch hangs just clear of the body.' },
       { sign: 'long', zone: ['crotch', 'waist'], weight: 'strong', because: 'there is spare length above the crotch', amounts: { shift: 1, 'fold-depth': 1, cloth: 1 } },
-      { sign: 'excess', zone: 'crotch', direction: 'horizontal', weight: 'slight', because: 'folds lie across at the crotch', amounts: { 'fold-depth': 1, cloth: 1 } },
+      { sign: 'excess', zone: 'crotch', direction: 'horizontal', weight: 'strong', because: 'folds lie across at the crotch', amounts: { 'fold-depth': 1, cloth: 1 } },
       { sign: 'drag-lines', zone: 'crotch', view: 'front', weight: 'strong', against: true, because: 'lines at the front crotch alone are a matter of the front' },
       { sign: 'binds', zone: ['crotch', 'thigh'], weight: 'slight', because: 'a low crotch shortens the step' },
       { sign: 'tight', zone: 'crotch', weight: 'strong', against: true, because: 'a crotch that cuts is not long' },
@@ -64,6 +65,7 @@ export const crotchRules: readonly Rule[] = [
     when: trousers, sided: 'both',
     signs: [
       { sign: 'drops', zone: 'waist', view: ['back', 'side'], weight: 'strong', because: 'the back waist is pulled down', amounts: { gap: 1, shift: 1 }, after: 'The back waist stays up when you sit.' },
+      { sign: 'short', zone: 'crotch', line: 'back', weight: 'strong', because: 'the back alone is short through the crotch', amounts: { gap: 1, shift: 1, cloth: 1 } },
       { sign: 'short', zone: ['crotch', 'seat', 'waist'], view: ['back', 'side'], weight: 'strong', because: 'the back is short through the crotch', amounts: { gap: 1, shift: 1, cloth: 1 } },
       { sign: 'tight', zone: ['seat', 'crotch'], view: 'back', line: 'crotch', weight: 'strong', because: 'the seat seam strains', amounts: { gap: 1 } },
       { sign: 'swings', zone: ['leg', 'hip', 'thigh', 'whole'], towards: 'back', line: 'side-seam', weight: 'fair', because: 'the back draws the side seam to it' },
@@ -141,6 +143,7 @@ export const crotchRules: readonly Rule[] = [
     recognise: 'Folds rise from the front crotch to hip or thigh, and the front strains when you sit.', words: ['smile lines', 'whiskers at the front crotch', 'front crotch tight'],
     when: trousers, sided: 'either',
     signs: [
+      { sign: 'short', zone: 'crotch', line: 'front', weight: 'strong', because: 'the front alone is short through the crotch', amounts: { cloth: 1, gap: 1, shift: 1 } },
       { sign: 'drag-lines', zone: 'crotch', view: 'front', towards: ['hip', 'up', 'side-seam', 'waist'], weight: 'strong', because: 'lines that rise from the crotch say that the front is short there', amounts: { cloth: 1 }, after: 'The lines from the front crotch are gone.' },
       { sign: 'drag-lines', zone: 'crotch', view: 'front', weight: 'fair', because: 'the cloth is caught at the front crotch', amounts: { cloth: 1 } },
       { sign: 'tight', zone: ['crotch', 'thigh'], view: 'front', weight: 'fair', because: 'the front is strained at the crotch', amounts: { cloth: 1, gap: 1 } },

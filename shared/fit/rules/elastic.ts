@@ -45,7 +45,8 @@ export const elasticRules: readonly Rule[] = [
     recognise: 'The band slips down though the cloth fits.', words: ['elastic too loose', 'band slips'],
     when: pullOn, sided: 'both',
     signs: [
-      { sign: 'drops', zone: ['waist', 'whole'], weight: 'strong', because: 'the band does not hold', amounts: {}, after: 'The band stays at the waist.' },
+      { sign: 'drops', zone: 'waist', line: 'waistband', weight: 'decisive', because: 'the band does not hold', after: 'The band stays at the waist.' },
+      { sign: 'drops', zone: ['waist', 'whole'], weight: 'fair', because: 'it hangs below the waist' },
       { sign: 'gaping', zone: 'waist', weight: 'strong', because: 'the band stands off', amounts: { gap: 1, cloth: 1 } },
       { sign: 'tight', zone: 'waist', weight: 'decisive', against: true, because: 'a band that cuts in is not long' },
     ],

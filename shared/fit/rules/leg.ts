@@ -13,6 +13,7 @@ export const legRules: readonly Rule[] = [
       { sign: 'tight', zone: 'thigh', weight: 'decisive', because: 'the leg is strained at the thigh', amounts: { cloth: 1, gap: 1 }, perSide: ['cloth', 'gap'], after: 'The thigh is easy.' },
       { sign: 'drag-lines', zone: 'thigh', towards: ['crotch', 'thigh'], weight: 'fair', because: 'the lines are caught at the inner thigh' },
       { sign: 'excess', zone: 'thigh', weight: 'decisive', against: true, because: 'spare cloth at the thigh is the reverse of it' },
+      { sign: 'tight', zone: 'thigh', view: 'front', direction: 'horizontal', weight: 'fair', against: true, because: 'strain straight across the front is a matter of the front' },
     ],
     measures: [{ plus: ['body:thigh'], minus: ['pattern:thigh'], grades: [{ from: 15, weight: 'strong' }, { from: 6, weight: 'fair' }, { below: -6, weight: 'fair', against: true }], because: 'the thigh is {value} more than the size is drafted for' }],
     amounts: { direction: 1, usualMm: [16, 24, 40] },
@@ -79,5 +80,20 @@ export const legRules: readonly Rule[] = [
     limits: { leastMm: 4, mostMm: 30, beyond: 'Leave the inside full: it hides the line of the leg.' }, stage: 'balance', opposite: 'knee-inward', predicts: 'The leg hangs straight.', recheck: ['crease', 'inseam and outseam lengths'], source: 'Hertzer, garment-cutting illustrations, screen 11',
     rivals: [{ cause: 'hip-tight', check: { ask: 'Is the hip easy where the folds begin?', yes: 'The leg is shifted.', no: 'The hip is tight.' } }],
     drawing: { sign: { figure: 'front', region: legBox, strokes: [{ kind: 'drag', from: [0.38, 0.54], to: [0.46, 0.74] }, { kind: 'drag', from: [0.62, 0.54], to: [0.54, 0.74] }] }, change: { piece: 'trouser-front', marks: [{ kind: 'move', from: [0.5, 0.6], to: [0.44, 0.6], label: 'outward' }] } },
+  },
+  {
+    cause: 'thigh-front-tight', title: 'Let the front out at inseam and side seam', sentence: 'The front is narrower at the thigh than it needs to be.',
+    recognise: 'The front strains straight across the thigh, the pockets stand open and the crease bows.', words: ['full front thigh', 'front thigh tight'],
+    when: trousers, sided: 'either',
+    signs: [
+      { sign: 'tight', zone: 'thigh', view: 'front', direction: 'horizontal', weight: 'decisive', because: 'the front alone is strained across the thigh', amounts: { cloth: 1, gap: 1 }, perSide: ['cloth', 'gap'], after: 'The front thigh is easy.' },
+      { sign: 'gaping', zone: 'hip', view: 'front', weight: 'slight', because: 'the pockets are pulled open' },
+      { sign: 'tight', zone: 'thigh', view: 'back', weight: 'strong', against: true, because: 'a back that is tight too asks for width all round' },
+    ],
+    measures: [], amounts: { direction: 1, usualMm: [12, 20, 32] },
+    change: { operation: 'seam-shift', steps: [{ piece: 'trouser-front', edge: 'inseam and side seam at the thigh', edges: 4, share: 'width', taper: 'to nothing at the knee', text: 'Let inseam and side seam of the {side} front out by {amount} each below the crotch, to nothing at the knee; set the crease in the middle again.' }], companions: [liningAlike, { piece: 'pocket', text: 'The pocket opening follows the side seam.', when: { needs: ['pockets'] } }], noCompanions: 'the back stays' },
+    limits: { leastMm: 5, mostMm: 60, beyond: 'Take a larger size for the front from the crotch down.' }, stage: 'hip', predicts: 'The front thigh is easy.', recheck: ['crease', 'inseams against each other'], source: 'common practice',
+    rivals: [{ cause: 'thigh-inner-tight', check: { ask: 'Does the strain lie across the front and not at the inner seam?', yes: 'The front is narrow.', no: 'The inner thigh lacks width.' } }, { cause: 'hip-tight', check: { ask: 'Is the hip easy?', yes: 'Only the thigh is tight.', no: 'Let the hip out first.' } }],
+    drawing: { sign: { figure: 'front', region: legBox, strokes: [{ kind: 'press', from: [0.4, 0.6], to: [0.48, 0.6] }, { kind: 'press', from: [0.52, 0.6], to: [0.6, 0.6] }] }, change: { piece: 'trouser-front', marks: [{ kind: 'taper', from: [0.95, 0.3], to: [1, 0.5], label: 'out' }] } },
   },
 ]

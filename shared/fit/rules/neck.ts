@@ -29,7 +29,7 @@ export const neckRules: readonly Rule[] = [
     recognise: 'The front neckline stands away, with a fold from the edge toward the bust.', words: ['gaping neckline', 'neckline stands away'],
     when: { kinds: ['bodice', 'shirt', 'dress'] }, sided: 'both',
     signs: [
-      { sign: 'gaping', zone: 'neck', view: 'front', weight: 'decisive', because: 'the edge stands off in front', amounts: { 'fold-depth': 1, cloth: 1, gap: 1 }, after: 'The neckline lies on the body.' },
+      { sign: 'gaping', zone: 'neck', view: 'front', weight: 'decisive', because: 'the edge stands off in front', amounts: { 'fold-depth': 1, cloth: 1, gap: 1 }, perSide: ['fold-depth'], after: 'The neckline lies on the body.' },
       { sign: 'excess', zone: 'neck', view: 'front', weight: 'strong', because: 'a fold stands at the front neckline', amounts: { 'fold-depth': 1, cloth: 1 }, perSide: ['fold-depth'] },
       { sign: 'tight', zone: 'bust', weight: 'fair', against: true, because: 'a bust that strains pulls the neckline open' },
       { sign: 'tight', zone: 'neck', weight: 'decisive', against: true, because: 'a neckline that binds is not long' },

@@ -93,7 +93,7 @@ export const shoulderRules: readonly Rule[] = [
     signs: [
       { sign: 'long', zone: 'shoulder', weight: 'decisive', because: 'the seam lies beyond the joint', amounts: { shift: 1, cloth: 1, 'fold-depth': 1 }, after: 'The armhole seam lies on the joint.' },
       { sign: 'off-place', zone: ['shoulder', 'armhole'], towards: 'in', weight: 'decisive', because: 'the armhole seam has to come in to the joint', amounts: { shift: 1 } },
-      { sign: 'drops', zone: ['shoulder', 'sleeve'], weight: 'fair', because: 'the sleeve head droops' },
+      { sign: 'drops', zone: ['shoulder', 'sleeve'], weight: 'fair', because: 'the sleeve head droops', amounts: { shift: 1 } },
       { sign: 'tight', zone: 'shoulder', weight: 'strong', against: true, because: 'a shoulder that strains is not long' },
     ],
     measures: [{ plus: ['pattern:shoulder'], minus: ['body:shoulder'], grades: [{ from: 10, weight: 'fair' }, { from: 4, weight: 'slight' }, { below: -4, weight: 'fair', against: true }], amount: 1, because: 'the size is drafted for a shoulder {value} longer' }],

@@ -321,6 +321,7 @@ export const waistRules: readonly Rule[] = [
       { sign: 'drops', zone: 'waist', view: ['front', 'side'], weight: 'strong', because: 'the front waist lies below its place', amounts: { shift: 1 }, after: 'The waist lies level.' },
       { sign: 'short', zone: 'waist', view: 'front', weight: 'fair', because: 'the front is short above the hip', amounts: { shift: 1, gap: 1 } },
       { sign: 'drops', zone: 'waist', view: 'back', weight: 'fair', against: true, because: 'a waist that drops behind too slips as a whole' },
+      { sign: 'drops', zone: 'waist', line: 'waistband', weight: 'strong', against: true, because: 'a band that slips is a matter of the band' },
     ],
     measures: [],
     amounts: { direction: 1, usualMm: [6, 12, 20] },

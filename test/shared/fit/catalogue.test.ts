@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { ruleOf, rules, rulesByZone } from '#shared/fit/catalogue.ts'
 import { causes, causesByZone } from '#shared/fit/causes.ts'
-import { checkIdOf } from '#shared/fit/reasoning/ruleIndex.ts'
+import { checkIdOf, listOf } from '#shared/fit/reasoning/ruleIndex.ts'
 import { fitsGarment } from '#shared/fit/reasoning/fitsGarment.ts'
 import { type Rule } from '#shared/fit/rule.ts'
 import { findMeasurement } from '#shared/measurements/findMeasurement.ts'
@@ -112,6 +112,12 @@ describe('every rule', () => {
     if (opposite) expect(ruleOf(opposite)?.opposite, `${cause} → ${opposite}`).toBe(cause)
     for (const { cause: moved } of moves ?? []) expect(ruleOf(moved), `${cause} moves ${moved}`).not.toBeNull()
     for (const other of conflictsWith ?? []) expect(ruleOf(other), `${cause} conflicts with ${other}`).not.toBeNull()
+  }))
+  it('points off-place signs the way they have to go: a seam above its place goes down', each(({ cause, signs }) => {
+    const other = { up: /\b(above|too high|higher)\b/, down: /\b(below|too low|lower)\b/, front: /\b(in front|forward of)\b/, back: /\b(behind|too far back)\b/ } as const
+    for (const { sign, towards, because } of signs) for (const target of listOf(towards)) {
+      if (listOf(sign).includes('off-place') && target in other) expect(because, `${cause}: towards ${target} means it has to go ${target}`).not.toMatch(other[target as keyof typeof other])
+    }
   }))
   it('gives one meaning to a check that two rules share', () => {
     const meaning = new Map<string, string>()

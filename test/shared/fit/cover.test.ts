@@ -16,10 +16,10 @@ const strength = fc.constantFrom(0, 0, 0, points.slight, points.fair, points.str
 const candidates = fc.array(fc.tuple(strength, strength, strength, strength, fc.constantFrom(0, 0, 0, -4, -8, 14)), { minLength: 1, maxLength: 6 })
   .map((list) => list.map(([a, b, c, d, bonus], place) => candidateOf(place, [a, b, c, d], bonus)).filter((candidate) => candidate.columns.size))
 
-/** What the documentation of the search promises: strengths, 3 for each observation explained, less 6 for each cause unless an answer speaks for it. */
+/** What the documentation of the search promises: strengths, 3 for each observation explained at least fairly, less 6 for each cause unless an answer speaks for it. */
 const worth = (set: readonly Candidate[]): number => sum(columns.map((column) => {
   const best = Math.max(0, ...set.map((candidate) => candidate.columns.get(column) ?? 0))
-  return best && best + 3
+  return best < points.fair ? best : best + 3
 })) + sum(set.map(({ bonus }) => Math.min(bonus, 6) - 6))
 const explainsNothing = (set: readonly Candidate[]): boolean => set.some((candidate) => columns.every((column) => {
   const own = candidate.columns.get(column) ?? 0
