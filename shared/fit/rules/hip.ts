@@ -49,7 +49,7 @@ export const hipRules: readonly Rule[] = [
     keeps: { body: 'waist', finished: 'waist', easeMm: 13, kept: 'The waist has ease enough and keeps its width.', short: 'The waist has too little ease as well: let the side seams out at the waist too.', unknown: 'Measure waist and finished waist to know whether the waist may keep its width.' },
     predicts: 'The cloth lies over the hip without strain and stays down.',
     recheck: ['whether the folds under the waist are gone', 'hem level', 'side seams plumb', 'sitting down'],
-    source: 'Fitting Dresses, U.S. Department of Agriculture, 1946; equal shares over the seams: Central Washington University costume text, ch. 17',
+    source: 'Fitting Dresses, U.S. Department of Agriculture, rev. 1946; equal shares over the seams: Pattern Alterations, costume text ch. 17, Central Washington University; limit: common practice',
     rivals: [
       { cause: 'full-seat-skirt', check: { ask: 'Open the side seams at hip level. Do front and back both spring open alike?', yes: 'Width is missing all round.', no: 'Only the back opens: room is missing over the seat.' } },
       { cause: 'full-abdomen-skirt', check: { ask: 'Look at the front from the side. Does its hem hang level with the back?', yes: 'It is width at the hip that lacks.', no: 'The front is too short and narrow over the abdomen.' } },
@@ -94,7 +94,7 @@ export const hipRules: readonly Rule[] = [
     stage: 'hip', opposite: 'hip-tight',
     predicts: 'The hip lies smooth with ease enough to sit.',
     recheck: ['sitting down', 'side seams plumb', 'waist'],
-    source: 'Fitting Dresses, U.S. Department of Agriculture, 1946; keeping wearing ease: Central Washington University costume text, ch. 17',
+    source: 'Fitting Dresses, U.S. Department of Agriculture, rev. 1946; equal shares and wearing ease kept: Pattern Alterations, costume text ch. 17, Central Washington University',
     rivals: [
       { cause: 'skirt-slips', check: { ask: 'Hold the waist where it belongs. Are the folds at the hip still there?', yes: 'The hip itself is too wide.', no: 'The waist is too wide and lets it slip.' } },
       { cause: 'flat-seat-skirt', check: { ask: 'Look from the back only. Are the folds at the sides too, not just under the seat?', yes: 'Width is spare all round.', no: 'Only the back has too much cloth.' } },
@@ -135,7 +135,7 @@ export const hipRules: readonly Rule[] = [
     stage: 'balance',
     predicts: 'Hem and centre front hang straight.',
     recheck: ['hem from the floor on both sides', 'centre front plumb'],
-    source: 'Extension manual on pattern alteration for one side, MT-265; Fitting Garments, HERR-32, U.S. Department of Agriculture (one hip larger)',
+    source: 'L. V. Hilyard, Pattern Alteration, Bulletin 265, Montana State College, 1950 (length on one side of the skirt); Pattern Alteration: A Guide for Leaders in Clothing Programs, Home Economics Research Report 32, U.S. Department of Agriculture, 1965 (one hip larger), both as listed; change: common practice',
     rivals: [
       { cause: 'hip-full-one-side', check: { ask: 'Measure from the floor to the waist on both sides. Is one side clearly higher?', yes: 'Length is missing on that side.', no: 'The waist is level: width is missing on that side.' } },
       { cause: 'low-shoulder', check: { ask: 'Does the garment hang from the waist and not from the shoulder?', yes: 'The hip tilts it.', no: 'Look at the shoulder first.' } },
@@ -175,7 +175,7 @@ export const hipRules: readonly Rule[] = [
     stage: 'hip',
     predicts: 'Both hips lie without strain.',
     recheck: ['side seams plumb', 'hem level'],
-    source: 'Fitting Garments, HERR-32, U.S. Department of Agriculture (one hip larger); amounts: common practice',
+    source: 'common practice; sign listed in Pattern Alteration: A Guide for Leaders in Clothing Programs, Home Economics Research Report 32, U.S. Department of Agriculture, 1965 (one hip larger)',
     rivals: [{ cause: 'hip-high-one-side', check: { ask: 'Is the hem level from the floor on both sides?', yes: 'Width is missing on that side.', no: 'Length is missing on that side.' } }, { cause: 'hip-tight', check: { ask: 'Open both side seams at the hip. Does only one spring open?', yes: 'One side is too narrow.', no: 'Width is missing all round.' } }],
     drawing: {
       sign: { figure: 'front', region: front, strokes: [{ kind: 'press', from: [0.54, 0.48], to: [0.64, 0.48] }, { kind: 'drag', from: [0.52, 0.46], to: [0.64, 0.48] }] },
@@ -212,7 +212,7 @@ export const hipRules: readonly Rule[] = [
     stage: 'hip',
     predicts: 'The sides lie smooth between waist and hip.',
     recheck: ['side seam curve', 'darts'],
-    source: 'common practice; level of the high hip a hand below the waist: pattern-fitting guide by Brenne, 2020',
+    source: 'common practice; level at which the high hip is measured: Brenne, article, 2020',
     rivals: [{ cause: 'hip-tight', check: { ask: 'Pinch the side seam at the fullest hip. Is there ease there?', yes: 'Only the part above it lacks width.', no: 'The hip itself is tight.' } }, { cause: 'hollow-back-skirt', check: { ask: 'Look at the sides. Do the folds lie there and not at the centre back?', yes: 'The side curve is too hollow.', no: 'The back waist is too long at its centre.' } }],
     drawing: {
       sign: { figure: 'front', region: front, strokes: [{ kind: 'fold', from: [0.38, 0.42], to: [0.44, 0.4] }, { kind: 'fold', from: [0.62, 0.42], to: [0.56, 0.4] }, { kind: 'press', from: [0.37, 0.44], to: [0.63, 0.44] }] },
@@ -249,7 +249,7 @@ export const hipRules: readonly Rule[] = [
     stage: 'hip',
     predicts: 'The side lies smooth from hip to thigh.',
     recheck: ['side seam curve', 'walking'],
-    source: 'Extension guide 742, Oregon State University (fullest part eight to nine inches below the waist); change: common practice',
+    source: 'common practice; hip levels: E. K. Carlson, Pants for Women: Fashion and Fit, Circular 742, Oregon State University, 1969',
     rivals: [{ cause: 'hip-tight', check: { ask: 'Pin a tape round at the strain. Does it lie at the top of the legs?', yes: 'The fullest part sits low.', no: 'It is the hip itself.' } }],
     drawing: {
       sign: { figure: 'front', region: [0.28, 0.4, 0.72, 0.68], strokes: [{ kind: 'press', from: [0.36, 0.54], to: [0.64, 0.54] }, { kind: 'fold', from: [0.37, 0.45], to: [0.38, 0.5] }] },
@@ -321,7 +321,7 @@ export const hipRules: readonly Rule[] = [
     stage: 'hem',
     predicts: 'A full step is easy.',
     recheck: ['walking and stairs', 'hem level at the sides'],
-    source: 'Fitting Garments, HERR-32, U.S. Department of Agriculture (narrow bottom); amounts: common practice',
+    source: 'common practice; sign listed in Pattern Alteration: A Guide for Leaders in Clothing Programs, Home Economics Research Report 32, U.S. Department of Agriculture, 1965 (narrow bottom)',
     rivals: [{ cause: 'hip-tight', check: { ask: 'Is the hip easy while the hem stops the step?', yes: 'Only the hem is too narrow.', no: 'Let the hip out first.' } }],
     drawing: {
       sign: { figure: 'front', region: [0.28, 0.45, 0.72, 0.8], strokes: [{ kind: 'press', from: [0.38, 0.7], to: [0.62, 0.7] }, { kind: 'drag', from: [0.5, 0.6], to: [0.4, 0.7] }] },
@@ -355,7 +355,7 @@ export const hipRules: readonly Rule[] = [
     stage: 'hip',
     predicts: 'The pleats hang closed when you stand.',
     recheck: ['pleats standing', 'waist level'],
-    source: 'Fitting Dresses, U.S. Department of Agriculture, 1946',
+    source: 'Fitting Dresses, U.S. Department of Agriculture, rev. 1946',
     rivals: [{ cause: 'waist-loose', check: { ask: 'Hold the waist up where it belongs. Do the pleats still stand open?', yes: 'Width is missing at the hip.', no: 'The waist is loose and lets the pleats drop.' } }],
     drawing: {
       sign: { figure: 'front', region: [0.28, 0.38, 0.72, 0.75], strokes: [{ kind: 'gape', from: [0.45, 0.46], to: [0.44, 0.7] }, { kind: 'gape', from: [0.55, 0.46], to: [0.56, 0.7] }] },
@@ -420,7 +420,7 @@ export const hipRules: readonly Rule[] = [
     stage: 'balance',
     predicts: 'The seam hangs straight once it is sewn anew.',
     recheck: ['seam tension', 'grain of both pieces'],
-    source: 'Fitting Dresses, U.S. Department of Agriculture, 1946',
+    source: 'Fitting Dresses, U.S. Department of Agriculture, rev. 1946',
     rivals: [{ cause: 'side-seam-forward', check: { ask: 'Unpick the seam and let it hang. Do both edges hang plumb?', yes: 'It was the sewing.', no: 'Front and back are of unequal length or width.' } }],
     drawing: {
       sign: { figure: 'side', region: [0.3, 0.38, 0.7, 0.75], strokes: [{ kind: 'plumb', from: [0.5, 0.42], to: [0.52, 0.7] }] },

@@ -39,7 +39,7 @@ export const seatRules: readonly Rule[] = [
     stage: 'length',
     predicts: 'The back lies smooth under the waistband.',
     recheck: ['hem level at the centre back', 'length of the top edge against the band', 'points of the back darts'],
-    source: 'Fitting Dresses, U.S. Department of Agriculture, 1946 (skirt top trimmed at the centre back); amount to nothing at the side seam: common practice',
+    source: 'Fitting Dresses, U.S. Department of Agriculture, rev. 1946 (skirt top trimmed at the centre back); to nothing at the side seam, and usual amounts: common practice',
     rivals: [
       { cause: 'hip-tight', check: { ask: 'Pull the skirt down until the fold is gone. Does it stay easy over the hip?', yes: 'The back is too long at its centre.', no: 'The hip is too tight and pushes the cloth up.' } },
       { cause: 'flat-seat-skirt', check: { ask: 'Look at the back hem from the side. Does it hang level with the front?', yes: 'Only the part above the hip is too long.', no: 'The back hangs long below the seat too.' } },
