@@ -10,7 +10,7 @@ export const causesByZone = {
   armhole: ['armhole-high', 'front-armhole-loose', 'armhole-low'],
   sleeve: ['full-upper-arm', 'thin-upper-arm', 'sleeve-long', 'sleeve-short'],
   waist: ['bodice-short', 'bodice-long', 'hollow-back', 'waist-front-low', 'waist-front-high', 'waist-tight', 'waist-loose', 'skirt-slips', 'midriff-tight', 'waist-back-loose', 'waistband-top-loose', 'waist-shape-high', 'waist-shape-low'],
-  abdomen: ['full-abdomen-skirt', 'full-abdomen-trousers', 'flat-abdomen', 'large-waist-jacket'],
+  abdomen: ['full-abdomen-skirt', 'full-abdomen-trousers', 'flat-abdomen', 'large-waist-jacket', 'full-abdomen-bodice', 'full-abdomen-gathers'],
   hip: ['hip-tight', 'hip-loose', 'hip-high-one-side', 'hip-full-one-side', 'hip-square', 'hip-low', 'hip-dart-point', 'side-seam-sewn', 'hem-narrow', 'pleats-spread', 'jacket-hip-tight'],
   seat: ['full-seat-skirt', 'flat-seat-skirt', 'hollow-back-skirt'],
   crotch: ['rise-short', 'rise-long', 'back-crotch-short', 'full-seat-trousers', 'flat-seat-trousers', 'front-crotch-short', 'front-crotch-long', 'seat-angle-large'],

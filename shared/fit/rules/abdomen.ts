@@ -6,7 +6,8 @@ export const abdomenRules: readonly Rule[] = [
   {
     cause: 'full-abdomen-skirt', title: 'Raise the front waist and give the front width', sentence: 'The front is shorter and narrower over the abdomen than it needs to be.',
     recognise: 'The front hem rises and swings out, folds run from the abdomen to the side seams, and these are drawn forward.', words: ['full tummy', 'front hem rises', 'skirt sticks out in front'],
-    when: { kinds: ['skirt', 'dress'] }, sided: 'both',
+    // Under gathers there is no dart to change: that has a rule of its own.
+    when: { kinds: ['skirt', 'dress'], without: ['gathered'] }, sided: 'both',
     signs: [
       { sign: 'rises', zone: 'hem', view: ['front', 'side'], weight: 'fair', because: 'the front is used up over the abdomen', amounts: { gap: 1, shift: 1 }, after: 'The front hem hangs level.' },
       { sign: 'tight', zone: 'abdomen', weight: 'decisive', because: 'the front is strained over the abdomen', amounts: { gap: 1 }, after: 'The front lies easy over the abdomen.' },
@@ -81,5 +82,63 @@ export const abdomenRules: readonly Rule[] = [
     predicts: 'The button closes without strain and the fronts hang straight.', recheck: ['fronts at the hem', 'armhole'], source: 'G. F. Hertzer, Garment Cutting in the Twentieth Century, screens 14 and 87 and the chapter on large waists; equal shares over the seams: common practice',
     rivals: [{ cause: 'jacket-hip-tight', check: { id: 'jacket-hip-tight~large-waist-jacket', ask: 'Open the last button. Do the fronts hang straight at the waist?', yes: 'Only the hip lacks width.', no: 'The waist lacks width.', yesMeans: 'rival' } }],
     drawing: { sign: { figure: 'front', region: belly, strokes: [{ kind: 'press', from: [0.42, 0.39], to: [0.58, 0.39] }, { kind: 'plumb', from: [0.5, 0.4], to: [0.44, 0.56] }] }, change: { piece: 'bodice-front', marks: [{ kind: 'taper', from: [0.85, 0.45], to: [0.95, 0.7], label: 'out' }] } },
+  },
+  {
+    cause: 'full-abdomen-bodice', title: 'Lengthen the centre front below the bust', sentence: 'The front is shorter and narrower over the abdomen than it needs to be.',
+    recognise: 'The front waist rides up and strains across, while bust, armhole and back lie well.', words: ['full tummy bodice', 'front waist rides up', 'bodice pulls up in front'],
+    when: { kinds: ['bodice', 'dress'] }, sided: 'both',
+    signs: [
+      { sign: 'rises', zone: 'waist', view: ['front', 'side'], weight: 'strong', because: 'the front is used up over the abdomen', amounts: { gap: 1, shift: 1 }, after: 'The front waist lies level.' },
+      { sign: 'tight', zone: 'waist', view: 'front', weight: 'fair', because: 'the front alone is strained at the waist' },
+      { sign: 'tight', zone: 'abdomen', view: ['front', 'side'], weight: 'fair', because: 'the front is strained over the abdomen' },
+      { sign: 'short', zone: 'midriff', view: ['front', 'side'], weight: 'fair', because: 'the front lacks length below the bust', amounts: { cloth: 1, gap: 1 } },
+      { sign: ['tight', 'drag-lines'], zone: 'bust', weight: 'strong', against: true, because: 'what is caught at the bust is a matter of the bust' },
+      { sign: 'gaping', zone: 'armhole', weight: 'fair', against: true, because: 'an armhole edge that stands off says that the bust draws the front up' },
+      { sign: 'rises', zone: 'waist', view: 'back', weight: 'strong', against: true, because: 'a waist that rises behind too is short all round' },
+      { sign: 'tight', zone: 'waist', view: 'back', weight: 'fair', against: true, because: 'a back that is tight too asks for width all round' },
+    ],
+    measures: [{ plus: ['body:abdomen'], minus: ['pattern:abdomen'], grades: [{ from: 20, weight: 'fair' }, { below: 0, weight: 'fair', against: true }], because: 'the abdomen is {value} more than this size is drafted for' }],
+    amounts: { direction: 1, usualMm: [6, 13, 20] },
+    change: { operation: 'slash-hinge', steps: [{ piece: 'bodice-front', edge: 'centre front below the bust', edges: 1, share: 'length', taper: 'to nothing at the side seam', text: 'Slash the front across below the bust from the centre to a hinge at the side seam and open it by {amount} at the centre; straighten the centre front and make the waist dart smaller by what the abdomen needs in width.' }], companions: [
+      { piece: 'front-facing', text: 'Lengthen the front facing by {whole} and divide the buttons again.', times: 1, when: { needs: ['button-front'] } },
+      { piece: 'lining', text: 'Change the front lining alike.', when: { needs: ['lining'] } },
+      { piece: 'skirt-front', text: 'Walk the skirt’s waist against the new bodice edge: a smaller dart makes it longer.', when: { needs: ['waist-seam'] } },
+    ], noCompanions: 'the back keeps its edge' },
+    limits: { leastMm: 5, mostMm: 40, beyond: 'Let the front side seams out below the bust as well.' }, stage: 'length',
+    predicts: 'The front waist lies level and easy.', recheck: ['front waist level', 'width at the waist', 'sitting down'],
+    source: 'common practice; sign listed in Pattern Alteration: A Guide for Leaders in Clothing Programs, Home Economics Research Report 32, U.S. Department of Agriculture, 1965',
+    rivals: [
+      { cause: 'full-bust', check: { ask: 'Look at bust and armhole. Do they lie smooth while the front waist rides up?', yes: 'The front is used up below the bust, over the abdomen.', no: 'The bust draws the front up.' } },
+      { cause: 'bodice-short', check: { ask: 'Is the waist in its place at the back and at the sides?', yes: 'Only the front is short.', no: 'The bodice is short all round.' } },
+      { cause: 'waist-front-high', check: { ask: 'Is the front strained at the waist as well as high?', yes: 'Room is missing over the abdomen.', no: 'Only the line lies too high.' } },
+    ],
+    drawing: { sign: { figure: 'front', region: [0.28, 0.24, 0.72, 0.5], strokes: [{ kind: 'level', from: [0.39, 0.37], to: [0.61, 0.37], bend: -0.03 }, { kind: 'press', from: [0.41, 0.38], to: [0.59, 0.38] }] }, change: { piece: 'bodice-front', marks: [{ kind: 'cut', from: [0, 0.75], to: [0.9, 0.75] }, { kind: 'hinge', from: [0.9, 0.75], to: [0.9, 0.75] }, { kind: 'spread', from: [0, 0.75], to: [0, 0.82], label: 'opened' }] } },
+  },
+  {
+    cause: 'full-abdomen-gathers', title: 'Raise the front waist under the gathers', sentence: 'The gathered front is shorter over the abdomen than it needs to be.',
+    recognise: 'The front hangs away from the legs and its hem is high, though the gathers fall free and nothing strains.', words: ['gathered skirt hangs out in front', 'front hem high'],
+    when: { kinds: ['skirt', 'dress'], needs: ['gathered'] }, sided: 'both',
+    signs: [
+      { sign: 'gaping', zone: 'hem', view: ['front', 'side'], weight: 'strong', because: 'the front hangs away from the legs' },
+      { sign: 'swings', zone: ['hem', 'whole', 'hip'], towards: 'front', weight: 'fair', because: 'the front is pushed forward over the abdomen' },
+      { sign: 'rises', zone: 'hem', view: ['front', 'side'], weight: 'fair', because: 'the front is used up over the abdomen', amounts: { gap: 1, shift: 1 }, after: 'The front hem hangs level.' },
+      { sign: 'drops', zone: 'waist', view: 'front', weight: 'slight', because: 'the front edge is drawn down' },
+      { sign: 'tight', zone: ['hip', 'abdomen'], weight: 'strong', against: true, because: 'what strains lacks width, and a longer front would not give it' },
+      { sign: 'rises', zone: 'hem', view: 'back', weight: 'fair', against: true, because: 'a hem that rises behind too is not a matter of the front' },
+    ],
+    measures: [], amounts: { direction: 1, usualMm: [8, 15, 25] },
+    change: { operation: 'seam-shift', steps: [{ piece: 'skirt-front', edge: 'waist at the centre front', edges: 1, share: 'length', taper: 'to nothing at the side seam', text: 'Raise the front waist by {amount} at the centre, to nothing at the side seam, and draw more of the gathers to the middle of the front.' }], companions: [
+      { piece: 'casing', text: 'Mark the fold line of the casing parallel to the raised edge.', when: { waist: ['elastic'] } },
+      { piece: 'waistband', text: 'The band keeps its length; mark the centre and the quarters anew.', when: { waist: ['fitted'] } },
+      { piece: 'lining', text: 'Raise the front lining alike.', when: { needs: ['lining'] } },
+    ], noCompanions: 'a dress takes it from the bodice' },
+    limits: { leastMm: 5, mostMm: 50, beyond: 'Fit the top to the hip with darts and let the gathers begin lower.' }, stage: 'length',
+    predicts: 'The front hem hangs level and falls straight.', recheck: ['front hem from the floor', 'where the gathers lie'],
+    source: 'common practice',
+    rivals: [
+      { cause: 'elastic-front-low', check: { ask: 'Look from the side. Does the front hang away from the legs?', yes: 'It is pushed out over the abdomen: give the front length.', no: 'Only the height of the casing is at fault.' } },
+      { cause: 'hip-tight', check: { ask: 'Can you pinch loose cloth at the side of the hip?', yes: 'There is width enough: length is missing in front.', no: 'Width is missing at the hip.' } },
+    ],
+    drawing: { sign: { figure: 'side', region: belly, strokes: [{ kind: 'plumb', from: [0.42, 0.42], to: [0.36, 0.68] }, { kind: 'level', from: [0.37, 0.66], to: [0.58, 0.69] }] }, change: { piece: 'skirt-front', marks: [{ kind: 'taper', from: [0, 0], to: [0.95, 0.04], label: 'raised' }] } },
   },
 ]
