@@ -49,7 +49,8 @@ export const abdomenRules: readonly Rule[] = [
     recognise: 'A pouch stands at the ends of the front darts, and the cloth is slack between them.', words: ['flat tummy', 'pouch at front darts'],
     when: { kinds: ['skirt', 'trousers'], without: ['dartless'] }, sided: 'both',
     signs: [
-      { sign: 'excess', zone: 'abdomen', view: ['front', 'side'], weight: 'strong', because: 'the darts let out more than is there', amounts: { 'fold-depth': 1, cloth: 1 }, after: 'The front lies flat below the darts.' },
+      { sign: 'excess', zone: 'abdomen', view: ['front', 'side'], direction: ['vertical', 'radiating'], weight: 'strong', because: 'the pouch stands at the ends of the darts', amounts: { 'fold-depth': 1, cloth: 1 }, after: 'The front lies flat below the darts.' },
+      { sign: 'excess', zone: 'abdomen', view: ['front', 'side'], weight: 'fair', because: 'the darts let out more than is there', amounts: { 'fold-depth': 1, cloth: 1 }, after: 'The front lies flat below the darts.' },
       { sign: 'tight', zone: 'abdomen', weight: 'decisive', against: true, because: 'an abdomen that strains is not too roomy' },
     ],
     measures: [], amounts: { direction: -1, usualMm: [8, 14, 20] },

@@ -347,7 +347,8 @@ export const waistRules: readonly Rule[] = [
     sentence: 'The front waist lies higher than it needs to.',
     recognise: 'The waist is level at the back and rises in front.',
     words: ['front waist too high', 'tilted waist'],
-    when: { kinds: ['skirt', 'trousers', 'dress'] }, sided: 'both',
+    // In trousers the front of the rise moves with it: that has a rule of its own.
+    when: { kinds: ['skirt', 'dress'] }, sided: 'both',
     signs: [
       { sign: 'rises', zone: 'waist', view: ['front', 'side'], weight: 'strong', because: 'the front waist lies above its place', amounts: { shift: 1 }, after: 'The waist lies level.' },
       { sign: 'excess', zone: 'waist', view: 'front', direction: 'horizontal', side: 'both', weight: 'fair', because: 'a fold lies under the front waist', amounts: { 'fold-depth': 1, cloth: 1 } },
@@ -359,7 +360,6 @@ export const waistRules: readonly Rule[] = [
       operation: 'seam-shift',
       steps: [
         { piece: 'skirt-front', edge: 'waist at the centre front', edges: 1, share: 'length', taper: 'to nothing at the side seam', text: 'Lower the front waist by {amount} at the centre, to nothing at the side seam.', when: { kinds: ['skirt', 'dress'] } },
-        { piece: 'trouser-front', edge: 'waist at the centre front', edges: 2, share: 'length', taper: 'to nothing at the side seam', text: 'Lower each front waist by {amount} at the centre, to nothing at the side seam.', when: { kinds: ['trousers'] } },
       ],
       companions: [{ piece: 'waistband', text: 'Walk the new edge against the band.', when: { waist: ['fitted'] } }, { piece: 'bodice-front', text: 'Lengthen the bodice front by {whole} at the centre where the two are joined.', times: -1, when: { kinds: ['dress'] } }, { piece: 'casing', text: 'Mark the fold line of the casing anew.', when: { waist: ['elastic'] } }],
     },
