@@ -16,7 +16,7 @@ export const causesByZone = {
   crotch: ['rise-short', 'rise-long', 'back-crotch-short', 'full-seat-trousers', 'flat-seat-trousers', 'front-crotch-short', 'front-crotch-long', 'seat-angle-large', 'front-crotch-curve', 'fly-recedes', 'seat-seam-short', 'front-waist-wide', 'front-waist-tilt', 'legs-crawl'],
   leg: ['thigh-inner-tight', 'thigh-loose', 'knee-inward', 'knee-outward', 'thigh-front-tight', 'calf-tight', 'leg-open', 'leg-twist', 'leg-wide', 'knee-loose'],
   hem: ['hem-short', 'hem-long', 'side-seam-forward', 'side-seam-back', 'hem-uneven', 'hem-bias-drop', 'grain-off-level', 'balance-back-short', 'balance-back-long', 'hem-corner'],
-  elastic: ['pull-on-narrow', 'elastic-short', 'elastic-long', 'elastic-front-low', 'elastic-back-low', 'gathers-much'],
+  elastic: ['pull-on-narrow', 'elastic-short', 'elastic-long', 'elastic-front-low', 'elastic-back-low', 'gathers-much', 'gathers-tight', 'gathers-uneven', 'casing-narrow', 'pull-on-rise-long', 'smock-front-short', 'blouse-uneven', 'yoke-tight', 'loose-crotch-low'],
 } as const
 
 export type ZoneFile = keyof typeof causesByZone
