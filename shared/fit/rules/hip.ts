@@ -119,7 +119,10 @@ export const hipRules: readonly Rule[] = [
       { sign: 'swings', zone: ['hem', 'whole', 'leg'], line: 'centre-front', weight: 'fair', because: 'the centre front is drawn out of the plumb' },
       { sign: 'tight', zone: 'hip', side: 'one', weight: 'slight', against: true, because: 'strain on one side asks for width there first' },
     ],
-    measures: [],
+    measures: [
+      { plus: ['body:waist-to-hip'], minus: [], leftRight: 'larger-side', grades: [{ from: 10, weight: 'strong' }, { from: 6, weight: 'fair' }], amount: 1, because: 'from waist to hip this side measures {value} more than the other' },
+      { plus: ['body:outside-leg'], minus: [], leftRight: 'larger-side', grades: [{ from: 10, weight: 'fair' }, { from: 6, weight: 'slight' }], because: 'from waist to floor this side measures {value} more than the other' },
+    ],
     amounts: { direction: 1, usualMm: [6, 10, 16] },
     change: {
       operation: 'seam-shift',
