@@ -90,7 +90,7 @@ export const abdomenRules: readonly Rule[] = [
     when: { kinds: ['bodice', 'dress'] }, sided: 'both',
     signs: [
       { sign: 'rises', zone: 'waist', view: ['front', 'side'], weight: 'strong', because: 'the front is used up over the abdomen', amounts: { gap: 1, shift: 1 }, after: 'The front waist lies level.' },
-      { sign: 'tight', zone: 'waist', view: 'front', weight: 'fair', because: 'the front alone is strained at the waist' },
+      { sign: 'tight', zone: 'waist', view: 'front', weight: 'strong', because: 'the front alone is strained at the waist' },
       { sign: 'tight', zone: 'abdomen', view: ['front', 'side'], weight: 'fair', because: 'the front is strained over the abdomen' },
       { sign: 'short', zone: 'midriff', view: ['front', 'side'], weight: 'fair', because: 'the front lacks length below the bust', amounts: { cloth: 1, gap: 1 } },
       { sign: ['tight', 'drag-lines'], zone: 'bust', weight: 'strong', against: true, because: 'what is caught at the bust is a matter of the bust' },

@@ -125,7 +125,7 @@ export const crotchRules: readonly Rule[] = [
     recognise: 'Spare cloth lies below the brow of the seat when you stand and is used up when you sit.', words: ['seat slope', 'seat angle'],
     when: trousers, sided: 'both',
     signs: [
-      { sign: 'excess', zone: 'seat', view: ['back', 'side'], direction: 'diagonal', weight: 'strong', because: 'the cloth hangs in slanting folds below the seat', amounts: { 'fold-depth': 1, cloth: 1 } },
+      { sign: 'excess', zone: 'seat', view: ['back', 'side'], direction: 'diagonal', weight: 'strong', because: 'the cloth hangs in slanting folds below the seat' },
       { sign: 'excess', zone: 'seat', view: 'back', weight: 'slight', because: 'spare cloth lies below the seat' },
       { sign: 'drops', zone: 'waist', view: 'back', weight: 'fair', against: true, because: 'a back waist that goes down needs the slope' },
     ],

@@ -97,7 +97,7 @@ export const elasticRules: readonly Rule[] = [
     recognise: 'The gathers are bulky and stand out from the waist.', words: ['bulky gathers', 'too much fullness'],
     when: { kinds: ['skirt', 'dress'], needs: ['gathered'] }, sided: 'both',
     signs: [
-      { sign: 'excess', zone: 'waist', direction: ['vertical', 'radiating'], weight: 'strong', because: 'the gathers stand out at the waist', amounts: { cloth: 1 }, after: 'The gathers fall soft.' },
+      { sign: 'excess', zone: 'waist', direction: ['vertical', 'radiating'], weight: 'decisive', because: 'the gathers stand out at the waist', amounts: { cloth: 1 }, after: 'The gathers fall soft.' },
       { sign: 'excess', zone: 'hip', view: 'front', direction: 'vertical', weight: 'slight', because: 'the fullness is carried down' },
       { sign: 'tight', zone: 'hip', weight: 'strong', against: true, because: 'a hip that strains needs the fullness' },
     ],

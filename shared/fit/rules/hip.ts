@@ -269,7 +269,7 @@ export const hipRules: readonly Rule[] = [
     sided: 'either',
     signs: [
       { sign: 'excess', zone: ['hip', 'abdomen', 'seat'], line: 'dart', weight: 'strong', because: 'spare cloth stands at the tip of the dart', amounts: { shift: 1 } },
-      { sign: 'off-place', zone: ['hip', 'abdomen', 'seat', 'waist'], line: 'dart', weight: 'decisive', because: 'the tip is not at its place', amounts: { shift: 1 }, after: 'The dart runs out flat.' },
+      { sign: 'off-place', zone: ['hip', 'abdomen', 'seat'], line: 'dart', weight: 'decisive', because: 'the tip is not at its place', amounts: { shift: 1 }, after: 'The dart runs out flat.' },
       { sign: 'tight', zone: 'hip', weight: 'slight', against: true, because: 'strain pulls bubbles flat' },
     ],
     measures: [],
