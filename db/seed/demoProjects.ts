@@ -82,8 +82,9 @@ export async function hangLarkrise(studio: SeedStudio, wearerId: string): Promis
   const tight = await studio.note(id, first, pictures, { kind: 'tight', points: [[0.33, 0.42], [0.67, 0.42]], sign: 'tight', zone: 'hip', view: 'front', side: 'both', line: 'side-seam', amount: { mm: 32, as: 'cloth' } })
   const back = await studio.note(id, first, pictures, { kind: 'excess', shape: 'area', points: [[0.4, 0.25], [0.6, 0.25], [0.6, 0.3], [0.4, 0.3]], sign: 'excess', zone: 'waist', view: 'back', side: 'centre', direction: 'horizontal', line: 'centre-back', amount: { mm: 8, as: 'fold-depth' } })
   const seam = await studio.note(id, first, pictures, { kind: 'balance', points: [[0.52, 0.25], [0.46, 0.85]], sign: 'swings', zone: 'hem', view: 'left', side: 'both', towards: 'front', line: 'side-seam', severity: 1 })
-  await studio.accept(id, first)
+  // Before anything is accepted: what a change already takes up can no longer be let be.
   await studio.letBe(id, seam, 'It hangs plumb when the elastic sits level')
+  await studio.accept(id, first)
   await studio.moveTo(id, first, 'reviewed')
 
   const second = await studio.startSample(id, 'sheeting')
