@@ -53,7 +53,7 @@ export const waistRules: readonly Rule[] = [
       { sign: 'excess', zone: 'waist', view: ['front', 'side'], direction: 'horizontal', weight: 'strong', because: 'the fold runs round into the front', amounts: { 'fold-depth': 1, cloth: 1 }, after: 'The folds round the waist are gone.' },
       { sign: 'excess', zone: 'midriff', view: ['front', 'side'], direction: 'horizontal', weight: 'fair', because: 'spare length folds above the waist', amounts: { 'fold-depth': 1, cloth: 1 }, after: 'The folds above the waist are gone.' },
       { sign: 'off-place', zone: 'waist', towards: 'up', weight: 'strong', because: 'the waist seam has to go up to the waist', amounts: { shift: 1 }, after: 'The waist seam lies at the waist.' },
-      { sign: 'excess', zone: ['waist', 'midriff'], view: 'back', direction: 'horizontal', weight: 'slight', because: 'spare length folds at the waist', amounts: { 'fold-depth': 1, cloth: 1 } },
+      { sign: 'excess', zone: ['waist', 'midriff'], view: 'back', direction: 'horizontal', weight: 'fair', because: 'spare length folds at the waist', amounts: { 'fold-depth': 1, cloth: 1 } },
       { sign: 'long', zone: ['waist', 'midriff'], weight: 'strong', because: 'the bodice ends below the waist', amounts: { shift: 1, 'fold-depth': 1, cloth: 1 } },
       { sign: 'drops', zone: 'waist', weight: 'fair', because: 'the waist lies below its place', amounts: { shift: 1 } },
       { sign: 'tight', zone: ['waist', 'hip'], weight: 'fair', against: true, because: 'a tight waist or hip pushes the cloth up' },

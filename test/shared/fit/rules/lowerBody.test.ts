@@ -7,7 +7,7 @@ import { describe, expect, it } from 'vitest'
 import { causesByZone, type Cause } from '#shared/fit/causes.ts'
 import { diagnose } from '#shared/fit/diagnose.ts'
 import { type FitInput, type Garment, type Side } from '#shared/fit/types.ts'
-import { causesOf, fitting } from '../../../support/fit.ts'
+import { causesOf, edgeAmounts, findingFor, fitting, sum } from '../../../support/fit.ts'
 import { look } from '../../../support/look.ts'
 
 type Row = { leads: Cause; from: string; garment: Garment; sees: readonly string[]; body?: FitInput['body']; pattern?: FitInput['pattern']; answers?: FitInput['answers']; side?: Side; mm?: number; also?: readonly Cause[] }
@@ -146,5 +146,113 @@ describe.each(Object.entries(tables))('%s', (zone, rows) => {
     expect(first!.side).toBe(side)
     if (mm !== undefined) expect(Math.abs(first!.change.amountMm)).toBe(mm)
     expect(causesOf(diagnosis).slice(1).toSorted()).toEqual([...also].toSorted())
+  })
+})
+
+const fit = (garment: Garment, sees: readonly string[], more: Partial<FitInput> = {}) => diagnose(fitting({ garment, observations: sees.map((text, i) => look(text, `o${i}`)), ...more }))
+const changeOf = (cause: Cause, ...what: Parameters<typeof fit>) => findingFor(fit(...what), cause)
+/** Piece, edge and amount of every step. */
+const stepsOf = (...what: Parameters<typeof changeOf>) => changeOf(...what).change.steps.map(({ pieceRole, edge, amountMm }) => `${pieceRole}, ${edge}: ${amountMm}`)
+const inch = 25.4
+
+describe('amounts on paper', () => {
+  it('hip 40 short: 10 on each of four edges; 41: one edge takes the odd millimetre', () => { // total divided by the seams there are: CWU, ch. 17
+    expect(edgeAmounts(changeOf('hip-tight', skirt, ['tight@hip =side-seam cloth:40']))).toEqual([10, 10, 10, 10])
+    expect(edgeAmounts(changeOf('hip-tight', skirt, ['tight@hip =side-seam cloth:41'])).toSorted()).toEqual([10, 10, 10, 11])
+  })
+  it('a skirt one inch too wide: a quarter inch at each side seam edge', () => // half an inch at each side seam: article, common practice
+    expect(edgeAmounts(changeOf('hip-loose', skirt, [`excess@hip ~vertical cloth:${inch}`], { unit: 'inch' }))).toEqual(Array(4).fill(-inch / 4)))
+  it('waist 36 short with two darts in front and two behind: half from the darts', () => { // darts or seams: school handbook and CWU, ch. 17; the half: common practice
+    const { change } = changeOf('waist-tight', skirt, ['tight@waist cloth:36'])
+    const edges = (edge: RegExp) => change.steps.filter((step) => edge.test(step.edge)).flatMap((step) => Array<number>(step.edges).fill(step.amountMm)).toSorted()
+    expect(edges(/side seam/)).toEqual([4, 4, 5, 5])
+    expect(edges(/dart/)).toEqual([4, 4, 5, 5])
+    expect(change.companions.find(({ pieceRole }) => pieceRole === 'waistband')?.amountMm).toBe(36)
+  })
+  it('waist one inch larger without darts: a quarter inch on four edges', () => // school handbook: one inch larger, one inch in all
+    expect(edgeAmounts(changeOf('waist-tight', { kind: 'skirt', waist: 'fitted' }, [`tight@waist cloth:${inch}`], { unit: 'inch' }))).toEqual(Array(4).fill(inch / 4)))
+  it('a fold under the back waist is lowered at the centre back only', () => // USDA: the top is trimmed at the centre back
+    expect(stepsOf('hollow-back-skirt', skirt, ['excess@waist ~horizontal =centre-back back C fold:8'])).toEqual(['skirt-back, top edge at the centre back: -16']))
+  it('a rise 20 short is 20 on the front and 20 on the back, fly and lining with it', () => { // Guide C-209; a length is never divided: common practice
+    const { change } = changeOf('rise-short', { ...trousers, features: ['fly', 'lining'] }, ['short@crotch cloth:20'])
+    expect(change.steps.map(({ pieceRole, amountMm }) => [pieceRole, amountMm])).toEqual([['trouser-front', 20], ['trouser-back', 20]])
+    expect(change.companions.filter(({ amountMm }) => amountMm === 20).map(({ pieceRole }) => pieceRole).toSorted()).toEqual(['fly', 'lining'])
+  })
+  it('a back crotch 24 short is half a wedge at the centre back, half at the point, to nothing at the knee', () => { // Loftin: at the point or along the seam
+    const { change } = changeOf('back-crotch-short', trousers, ['short@crotch =back back cloth:24'])
+    expect(change.steps).toMatchObject([{ amountMm: 12, taper: 'to nothing at the side seam' }, { amountMm: 12, taper: 'to nothing at the knee' }])
+    expect(change.steps.every(({ pieceRole }) => pieceRole === 'trouser-back')).toBe(true)
+  })
+  it('fullness of twice a 30 in waist becomes one and a half: 3¾ in from each quarter', () => // article, common practice: 15 in to 11¼ in
+    expect(edgeAmounts(changeOf('gathers-much', gathered, [`excess@waist ~vertical cloth:${15 * inch}`], { unit: 'inch' }))).toEqual(Array(4).fill(-3.75 * inch)))
+  it('an elastic of 40 with 20 of allowances and 12 of ease wants a casing of 112', () => { // twice the elastic, the allowances and half an inch: article, common practice
+    const drafted = 100
+    expect(drafted + changeOf('casing-narrow', pullOn, ['short@waist =waistband cloth:12']).change.steps[0]!.amountMm).toBe(2 * 40 + 20 + 12)
+  })
+  it('heights from the floor of 1020, 1025 and 1035: the back casing 15 above the front, the side 5', () => { // Cunningham
+    const [front, side, back] = [1020, 1025, 1035]
+    const diagnosis = fit(pullOn, [`rises@waist =centre-front C shift:${side - front}`, `drops@waist =centre-back back C shift:${back - side}`])
+    const edge = (cause: Cause) => findingFor(diagnosis, cause).change.steps[0]!
+    expect(edge('elastic-back-low').amountMm - edge('waist-front-high').amountMm).toBe(back - front)
+    expect(-edge('waist-front-high').amountMm).toBe(side - front)
+    for (const { change } of diagnosis.findings) expect(change.steps[0]!.taper).toBe('to nothing at the side seam')
+  })
+  it('a close knee gives more outside than it gains inside, within the published ranges', () => { // Hertzer: five to six eighths outside, two to three eighths inside
+    const amounts = changeOf('knee-loose', trousers, ['excess@knee =side-seam !3']).change.steps.map(({ amountMm }) => amountMm)
+    for (const outside of amounts.slice(0, 2)) expect(-outside / inch * 8).toBeGreaterThanOrEqual(5)
+    for (const inside of amounts.slice(2)) { expect(inside / inch * 8).toBeGreaterThanOrEqual(2); expect(inside / inch * 8).toBeLessThanOrEqual(3) }
+  })
+  it('spare cloth round the knee is taken whole, what goes outside less what comes inside', () =>
+    expect(sum(changeOf('knee-loose', trousers, ['excess@knee =side-seam cloth:30']).change.steps.map(({ amountMm }) => amountMm))).toBe(-30))
+  it.each(['leg-open', 'knee-inward'] as const)('%s keeps the width of the leg', (cause) => { // Hertzer, screens 11 and 20: equal in and out
+    const sees = cause === 'leg-open' ? ['drag-lines@leg =inseam >front'] : ['swings@leg >out shift:10', 'tight@knee =inseam']
+    expect(sum(changeOf(cause, trousers, sees).change.steps.map(({ amountMm }) => amountMm))).toBe(0)
+  })
+  it('leaves the inside of an outward leg fuller than the outside asks', () => // Hertzer, screen 11: leave the inside fairly full
+    expect(sum(changeOf('knee-outward', trousers, ['swings@leg >in shift:10', 'tight@knee =side-seam']).change.steps.map(({ amountMm }) => amountMm))).toBeGreaterThan(0))
+  it('one tight calf stays on its leg: half on each edge of that back', () => {
+    const { side, change } = changeOf('calf-tight', trousers, ['tight@leg back L cloth:16'])
+    expect(side).toBe('left')
+    expect(change.steps).toMatchObject([{ pieceRole: 'trouser-back', side: 'left', edges: 2, amountMm: 8 }])
+  })
+})
+
+describe('neighbours are told apart', () => {
+  const fold = 'excess@waist ~horizontal =centre-back back C fold:8'
+  it.each([
+    ['smooth front and sides', skirt, [fold], {}, 'hollow-back-skirt'],
+    ['with strain at the hip it is the hip', skirt, [fold, 'tight@hip =side-seam cloth:30'], {}, 'hip-tight'],
+    ['not easy over the hip when pulled down', skirt, [fold], { 'hollow-back-skirt~hip-tight': 'no' }, 'hip-tight'],
+    ['at the sides only', skirt, ['excess@waist ~horizontal =side-seam'], {}, 'hip-square'],
+    ['all round in pull-on trousers', pullOnTrousers, ['excess@waist ~horizontal', 'excess@waist ~horizontal back'], {}, 'pull-on-rise-long'],
+    ['in a dress, into the front', dress, ['excess@waist ~horizontal', 'excess@waist ~horizontal back'], {}, 'bodice-long'],
+  ] as const)('a fold under the waist: %s', (_, garment, sees, answers, leads) => expect(fit(garment, sees, { answers }).findings[0]?.cause).toBe(leads))
+  it.each([
+    ['hem and seat', skirt, ['rises@hem =centre-back back C', 'tight@seat back'], 'full-seat-skirt'],
+    ['girths right, waist drawn down', pullOn, ['rises@hem =centre-back back C', 'drops@waist =centre-back back C'], 'elastic-back-low'],
+  ] as const)('a back hem that rises: %s', (_, garment, sees, leads) => expect(causesOf(fit(garment, sees))).toEqual([leads]))
+  it.each([
+    ['up and away', ['drag-lines@crotch >hip'], 'front-crotch-short'],
+    ['down and away', ['drag-lines@crotch >thigh'], 'front-crotch-long'],
+    ['upright at the seam', ['excess@crotch ~vertical'], 'front-crotch-curve'],
+    ['across, hanging low', ['excess@crotch ~horizontal', 'drops@crotch'], 'rise-long'],
+  ] as const)('folds at the front crotch: %s', (_, sees, leads) => expect(causesOf(fit(trousers, sees))).toEqual([leads]))
+  it.each([
+    ['sagging across', ['excess@seat ~horizontal back'], 'flat-seat-trousers'],
+    ['upright beside the seam', ['excess@seat ~vertical =crotch back'], 'seat-seam-short'],
+    ['behind the knee', ['excess@knee ~horizontal back'], 'calf-tight'],
+  ] as const)('folds behind: %s', (_, sees, leads) => expect(causesOf(fit(trousers, sees))).toEqual([leads]))
+  it('coat fronts: apart with the waist strained is width, apart with nothing strained is balance', () => {
+    expect(causesOf(fit(coat, ['swings@hem =centre-front >out', 'tight@waist']))).toEqual(['large-waist-jacket'])
+    expect(causesOf(fit(coat, ['swings@hem =centre-front >out']))).toEqual(['balance-back-long'])
+  })
+  it('a check turns the leading cause, either way', () => {
+    const lead = (answer: 'yes' | 'no') => fit(trousers, ['drag-lines@knee'], { answers: { 'leg-open~knee-inward': answer } }).findings[0]?.cause
+    expect(lead('yes')).toBe('leg-open')
+    expect(lead('no')).toBe('knee-inward')
+  })
+  it('changes that undo each other are said to', () => {
+    const { conflicts } = fit(trousers, ['swings@leg >in shift:10', 'drag-lines@leg =inseam', 'tight@knee =side-seam'])
+    expect(conflicts).toHaveLength(1)
   })
 })
