@@ -185,9 +185,10 @@ describe('amounts on paper', () => {
   })
   it('fullness of twice a 30 in waist becomes one and a half: 3¾ in from each quarter', () => // article, common practice: 15 in to 11¼ in
     expect(edgeAmounts(changeOf('gathers-much', gathered, [`excess@waist ~vertical cloth:${15 * inch}`], { unit: 'inch' }))).toEqual(Array(4).fill(-3.75 * inch)))
-  it('an elastic of 40 with 20 of allowances and 12 of ease wants a casing of 112', () => { // twice the elastic, the allowances and half an inch: article, common practice
-    const drafted = 100
-    expect(drafted + changeOf('casing-narrow', pullOn, ['short@waist =waistband cloth:12']).change.steps[0]!.amountMm).toBe(2 * 40 + 20 + 12)
+  it('what a casing lacks in width is added whole, and the casing is told apart from the elastic', () => { // width of a casing: article, common practice
+    const { change } = changeOf('casing-narrow', pullOn, ['short@waist =waistband cloth:12'])
+    expect(change.steps).toMatchObject([{ pieceRole: 'casing', amountMm: 12 }])
+    expect(causesOf(fit(pullOn, ['short@waist =waistband cloth:12']))).toEqual(['casing-narrow'])
   })
   it('heights from the floor of 1020, 1025 and 1035: the back casing 15 above the front, the side 5', () => { // Cunningham
     const [front, side, back] = [1020, 1025, 1035]
