@@ -22,7 +22,7 @@ export type Cover = {
  * together), exchanging and dropping while that helps. Equal sets are told apart by the catalogue's order, never by the order of the observations.
  */
 export function coverObservations(candidates: readonly Candidate[]): Cover {
-  const table = tabulate(withoutOutdone([...candidates].sort((a, b) => ownPoints(b) - ownPoints(a) || a.place - b.place || (a.side < b.side ? -1 : 1))))
+  const table = tabulate(withoutOutdone([...candidates].sort(byStanding)))
   let best: readonly number[] = []
   let bestValue = 0
   const improve = (tries: Iterable<readonly number[]>): boolean => {
@@ -40,6 +40,15 @@ export function coverObservations(candidates: readonly Candidate[]): Cover {
   const explainedBy = new Map<string, Candidate>()
   table.columns.forEach((column, i) => { if (by[i]! >= 0) explainedBy.set(column, table.list[by[i]!]!) })
   return { chosen: best.map((i) => table.list[i]!), explainedBy }
+}
+
+/**
+ * The one with more behind it first; of equals by the catalogue's order, and one cause on several sides by what it explains: left before
+ * right would answer a mirrored fitting otherwise.
+ */
+function byStanding(a: Candidate, b: Candidate): number {
+  const seen = ({ columns }: Candidate) => [...columns.keys()].sort().join()
+  return ownPoints(b) - ownPoints(a) || a.place - b.place || Number(b.side === 'both') - Number(a.side === 'both') || (seen(a) < seen(b) ? -1 : 1)
 }
 
 /** All that speaks for a cause less all that speaks against it, whatever else is chosen. */

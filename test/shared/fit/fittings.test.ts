@@ -13,8 +13,6 @@ type Fitting = { why: string; garment: Garment; sees: readonly string[]; body?: 
 
 const bodice: Garment = { kind: 'bodice', features: ['darts', 'waist-seam'] }
 const sleeved: Garment = { kind: 'bodice', sleeves: 'set-in', features: ['darts'] }
-const shirt: Garment = { kind: 'shirt', sleeves: 'set-in', features: ['dartless', 'button-front', 'collar'] }
-const jacket: Garment = { kind: 'jacket', sleeves: 'set-in', features: ['darts', 'collar', 'lining', 'button-front'] }
 const skirt: Garment = { kind: 'skirt', waist: 'fitted', features: ['darts', 'waistband', 'straight'] }
 const trousers: Garment = { kind: 'trousers', waist: 'fitted', features: ['darts', 'waistband', 'fly'] }
 const dress: Garment = { kind: 'dress', sleeves: 'none', features: ['darts'] }
