@@ -1,6 +1,5 @@
 import { createHash } from 'node:crypto'
-import { existsSync, readFileSync, readdirSync, statSync, writeFileSync } from 'node:fs'
-import { build } from 'vite'
+import { existsSync, readFileSync, readdirSync, rmSync, statSync, writeFileSync } from 'node:fs'
 import { root } from './localSettings.ts'
 
 const stampFile = `${root}/dist/client.stamp`
@@ -11,6 +10,9 @@ export async function buildClient(): Promise<void> {
   const now = stampOf(sources)
   if (existsSync(`${root}/dist/client/index.html`) && existsSync(stampFile) && readFileSync(stampFile, 'utf8') === now) return
   console.log('Building the client.')
+  // A build that is broken off must not pass for a whole one.
+  rmSync(stampFile, { force: true })
+  const { build } = await import('vite') // only here: loading it takes longer than the rest of a start
   await build({ root, logLevel: 'warn' })
   writeFileSync(stampFile, now)
 }

@@ -1,50 +1,44 @@
 import { connect } from '#db/client.ts'
-import { CommandError } from '#db/local/CommandError.ts'
-import { ensureDatabase, isFree, startLocalPostgres } from '#db/local/LocalPostgres.ts'
+import { ensureDatabase } from '#db/local/ensureDatabase.ts'
+import { startLocalPostgres } from '#db/local/localPostgres.ts'
 import { migrate } from '#db/migrate.ts'
 import { type SignIn, seedDemo } from '#db/seed/seedDemo.ts'
 import { type RunningServer, startServer } from '../main.ts'
 import { readSettings } from '../settings.ts'
 import { openStore } from '../storage/openStore.ts'
-import { endInOrder } from './ending.ts'
-import { dataFolder, ensureDataFolder, sessionSecret, takeFolder } from './localSettings.ts'
-
-export type Started = { server: RunningServer; signIns: readonly SignIn[] }
+import { type Life } from './life.ts'
+import { checkRoom, dataFolder, ensureDataFolder, localPort, sessionSecret, takeFolder } from './localSettings.ts'
 
 /**
- * Database, migrations, demo studio and server on this machine; Ctrl-C ends them in order.
- * @param prepare - done while nothing is running yet, such as building the client
+ * Database, migrations, demo studio and server on this machine.
+ * @param prepare - done before anything runs, such as building the client
  * @throws CommandError with one line when port, disk or data stand in the way
  */
-export async function startLocal(prepare: () => Promise<void>): Promise<Started> {
-  const port = Number(process.env.PORT ?? 4310)
-  if (!Number.isInteger(port) || port < 1 || port > 65_535) throw new CommandError(`PORT is ${process.env.PORT}; it must be a number from 1 to 65535.`)
-  if (!(await isFree(port))) throw new CommandError(`Port ${port} is in use. Stop what listens there, or choose another: PORT=4311 npm start`)
+export async function startLocal(life: Life, prepare: () => Promise<void>): Promise<{ server: RunningServer; signIns: readonly SignIn[] }> {
+  const port = await localPort()
   ensureDataFolder()
-  const giveFree = takeFolder()
-  let server: RunningServer | null = null
-  let stopDatabase = () => {}
-  const end = endInOrder(async () => {
-    console.log('\nStopping.')
-    await server?.stop()
-    stopDatabase()
-    giveFree()
-  })
-  try {
-    await prepare()
-    const postgres = await startLocalPostgres(`${dataFolder}/postgres`)
-    stopDatabase = postgres.stop
-    await ensureDatabase(postgres, 'proofcloth')
-    const settings = readSettings({ PHOTO_STORAGE: `disk:${dataFolder}/photographs`, LOG_LEVEL: 'warn', ...process.env, DATABASE_URL: postgres.url('proofcloth'), SESSION_SECRET: sessionSecret(), PORT: String(port) }, 'local')
+  await life.begin(async () => takeFolder(), (giveFree) => giveFree())
+  await prepare()
+  const postgres = await life.begin(() => startLocalPostgres(`${dataFolder}/postgres`), ({ stop }) => stop())
+  checkRoom(postgres.place)
+  await ensureDatabase(postgres, 'proofcloth')
+  const settings = readSettings({
+    PHOTO_STORAGE: `disk:${dataFolder}/photographs`, LOG_LEVEL: 'warn', ...process.env,
+    // Demo accounts with a known password are for this machine's own eyes, whatever the environment says.
+    HOST: '127.0.0.1', PORT: String(port), DATABASE_URL: postgres.url('proofcloth'), SESSION_SECRET: sessionSecret(),
+  }, 'local')
+  const { signIns } = await life.begin(async () => {
     const { db, pool } = connect(settings.databaseUrl)
-    await migrate(db)
-    const signIns = await seedDemo(db, await openStore(settings.photoStorage))
-    await pool.end()
-    server = await startServer(settings)
-    return { server, signIns }
-  } catch (error) {
-    console.error(error instanceof CommandError ? error.message : error)
-    await end(1)
-    throw error
-  }
+    try {
+      await migrate(db)
+      return { signIns: await seedDemo(db, await openStore(settings.photoStorage)) }
+    } finally {
+      await pool.end()
+    }
+  }, () => {})
+  const server = await life.begin(() => startServer(settings), async (begun) => {
+    console.log('\nStopping.')
+    await begun.stop()
+  })
+  return { server, signIns }
 }

@@ -1,6 +1,6 @@
 import { defineConfig } from '@playwright/test'
 
-const port = 4399
+const port = Number(process.env.E2E_PORT ?? 4399)
 
 export default defineConfig({
   testDir: '.',
