@@ -8,7 +8,7 @@ const openCost = 3
 /** Up to this many candidates every set is tried: 2⁹ are 512. */
 const mostForAll = 9
 /** Two causes are tried together up to this many candidates; a fitting of six observations seldom has more worth trying. */
-const mostForPairs = 40
+const mostForPairs = 24
 
 export type Cover = {
   chosen: readonly Candidate[]
@@ -25,17 +25,17 @@ export function coverObservations(candidates: readonly Candidate[]): Cover {
   const table = tabulate(withoutOutdone([...candidates].sort(byStanding)))
   let best: readonly number[] = []
   let bestValue = 0
-  const improve = (tries: Iterable<readonly number[]>): boolean => {
+  const improve = (tries: Iterable<readonly number[]>, settle: typeof slim): boolean => {
     const before = bestValue
     for (const next of tries) {
-      const [set, value] = slim(next, table)
+      const [set, value] = settle(next, table)
       if (value > bestValue) [best, bestValue] = [set, value]
     }
     return bestValue > before
   }
   const count = table.list.length
-  if (count <= mostForAll) improve(everySet(count))
-  else while (improve(neighbours(best, count)) || improve(withPairs(best, count)));
+  if (count <= mostForAll) improve(everySet(count), pruned)
+  else while (improve(neighbours(best, count), pruned) || improve(withPairs(best, count), slim));
   const by = explainers(best, table)
   const explainedBy = new Map<string, Candidate>()
   table.columns.forEach((column, i) => { if (by[i]! >= 0) explainedBy.set(column, table.list[by[i]!]!) })
@@ -128,15 +128,18 @@ function prune(set: readonly number[], table: Table): readonly number[] {
   }
 }
 
+function pruned(set: readonly number[], table: Table): [readonly number[], number] {
+  const kept = prune(set, table)
+  return [kept, valueOf(kept, table)]
+}
+
 /** A set without the members that cost more than they explain: who comes in may make others not worth their place. */
 function slim(set: readonly number[], table: Table): [readonly number[], number] {
-  let kept = prune(set, table)
-  let value = valueOf(kept, table)
+  let [kept, value] = pruned(set, table)
   for (let slimmer = kept.length > 1; slimmer;) {
     slimmer = false
     for (const member of kept) {
-      const without = prune(kept.filter((other) => other !== member), table)
-      const worth = valueOf(without, table)
+      const [without, worth] = pruned(kept.filter((other) => other !== member), table)
       if (worth > value) [kept, value, slimmer] = [without, worth, true]
     }
     slimmer &&= kept.length > 1
