@@ -22,8 +22,8 @@ afterEach(async () => {
   rmSync(above, { recursive: true })
 })
 
-async function start(): Promise<LocalPostgres> {
-  const postgres = await startLocalPostgres(folder, { throwAway: true })
+async function start({ throwAway = true } = {}): Promise<LocalPostgres> {
+  const postgres = await startLocalPostgres(folder, { throwAway })
   running.push(postgres)
   return postgres
 }
@@ -70,12 +70,12 @@ it('takes over a server that a killed command has left running', async () => {
 })
 
 it('starts again after the server was killed, with what was written', async () => {
-  const first = await start()
+  const first = await start({ throwAway: false })
   await ensureDatabase(first, 'kept')
   await ask(first, 'create table notes as select 1 as n')
   killServer()
   await delay(200)
-  expect(await ask(await start(), 'select n from notes')).toEqual([{ n: 1 }])
+  expect(await ask(await start({ throwAway: false }), 'select n from notes')).toEqual([{ n: 1 }])
 })
 
 it('starts when the lock names a number that is another process’s by now', async () => {
