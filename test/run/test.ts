@@ -1,9 +1,12 @@
 import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs'
+import { CommandError } from '#db/local/CommandError.ts'
 import { findChromium } from '#db/local/findChromium.ts'
 import { freePort } from '#db/local/ports.ts'
+import { postgresBinaries } from '#db/local/postgresBinaries.ts'
 import { buildClient } from '#server/commands/buildClient.ts'
 import { type Life } from '#server/commands/life.ts'
 import { root } from '#server/commands/localSettings.ts'
+import { plainLine } from '#server/commands/plainLine.ts'
 import { runCommand } from '#server/commands/runCommand.ts'
 import { type Count, addUp, readPlaywrightReport, readVitestReport, withExitCode } from './readReports.ts'
 import { runTool } from './runTool.ts'
@@ -15,7 +18,7 @@ const reports = `${root}/test-results`
 await runCommand(async (life) => {
   rmSync(reports, { recursive: true, force: true })
   mkdirSync(reports, { recursive: true })
-  const chromium = findChromium()
+  const chromium = await tools()
   const postgres = await life.begin(throwAwayPostgres, ({ stop }) => stop())
   // What the runners, the servers they start and the browsers leave about goes with the folder.
   const env = { TEST_DATABASE_URL: postgres.url('postgres'), CHROMIUM: chromium, TMPDIR: postgres.folder }
@@ -29,6 +32,14 @@ await runCommand(async (life) => {
   console.log(`\n${passed} passed, ${failed} failed`)
   return failed > 0 ? 1 : 0
 }, { codeWhenAsked: 130 })
+
+/** Path of Chromium. @throws CommandError with a line for each program that is missing, so that they are installed in one go */
+async function tools(): Promise<string> {
+  const [chromium, postgres] = await Promise.allSettled([(async () => findChromium())(), (async () => postgresBinaries(null, ''))()])
+  const missing = [chromium, postgres].flatMap((one) => (one.status === 'rejected' ? [plainLine(one.reason) ?? String(one.reason)] : []))
+  if (missing.length || chromium.status === 'rejected') throw new CommandError(missing.join('\n'))
+  return chromium.value
+}
 
 /** A check that passes or fails as a whole counts as one test. */
 async function check(life: Life, name: string, tool: string, args: readonly string[]): Promise<Count> {
