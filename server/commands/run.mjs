@@ -65,7 +65,12 @@ function run(program, args, stdio) {
   return new Promise((done) => {
     const child = spawn(program, args, { cwd: root, stdio })
     let asked = false
-    const pass = (/** @type {NodeJS.Signals} */ signal) => { asked = true; child.kill(signal) }
+    const pass = (/** @type {NodeJS.Signals} */ signal) => {
+      asked = true
+      child.kill(signal)
+      // npm goes on to the end of its work and only then says that it was broken off; half of it is thrown away next time.
+      if (program === 'npm') setTimeout(() => child.kill('SIGKILL'), 1000).unref()
+    }
     const signals = /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])
     for (const signal of signals) process.on(signal, pass)
     child.on('error', (error) => { console.error(`${program} did not start: ${error.message}`); done(1) })
