@@ -22,7 +22,7 @@ export function securityHeaders(settings: Settings): RequestHandler {
 /** What helmet sets is the same for every response but for the nonce, so it is asked once and not a dozen functions per request. */
 function headersOf(settings: Settings): Map<string, string> {
   // The camera for our own pages, everything else for nobody.
-  const headers = new Map([['Permissions-Policy', 'camera=(self), microphone=(), geolocation=(), payment=(), usb=(), serial=(), bluetooth=(), midi=(), display-capture=(), browsing-topics=()']])
+  const headers = new Map([['Permissions-Policy', 'camera=(self), microphone=(), geolocation=(), payment=(), usb=(), serial=(), midi=(), display-capture=(), browsing-topics=()']])
   const collector = { setHeader: (name: string, value: string) => headers.set(name, value), removeHeader: (name: string) => headers.delete(name) }
   let failed: unknown
   helmet({

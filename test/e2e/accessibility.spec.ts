@@ -1,8 +1,8 @@
 import AxeBuilder from '@axe-core/playwright'
-import { expect, test } from '@playwright/test'
+import { type Page, expect, test } from '@playwright/test'
 import { garments, signIn } from './people.ts'
 
-const outside = ['/sign-in', '/sign-up', '/reset', '/reset/abcdefghijklmnopqrstuv']
+const outside = ['/sign-in', '/sign-up', '/reset', '/reset-password']
 const inside = ['/', '/new', '/people', '/patterns', '/studio', '/account', '/nothing-here']
 const ofProject = ['', '/size', '/pieces', '/samples/1', '/samples/2', '/compare', '/final-cut', '/story', '/print/cutting-sheet']
 
@@ -28,7 +28,7 @@ for (const theme of ['light', 'dark'] as const) {
   })
 }
 
-async function look(page: import('@playwright/test').Page, path: string): Promise<void> {
+async function look(page: Page, path: string): Promise<void> {
   await page.goto(path)
   await expect(page.getByRole('heading').first()).toBeVisible()
   await expect(page.locator('[aria-busy=true]')).toHaveCount(0)

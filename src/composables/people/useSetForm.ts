@@ -38,6 +38,11 @@ export function useSetForm(params: { studioId: string; wearerId: string }, taken
     key = crypto.randomUUID()
     open.value = true
   }
+  function setReading(code: string, i: number, mm: number | null) {
+    const row = [...(readings.value[code] ?? [null, null, null])]
+    row[i] = mm
+    readings.value = { ...readings.value, [code]: row }
+  }
   const add = (code: string) => { if (!readings.value[code]) readings.value = { ...readings.value, [code]: [null, null, null] } }
   const typed = (code: string) => (readings.value[code] ?? []).filter((mm): mm is number => mm !== null)
   const combined = (code: string) => combineReadings(typed(code), readingToleranceMm(code))
@@ -67,6 +72,6 @@ export function useSetForm(params: { studioId: string; wearerId: string }, taken
       busy.value = false
     }
   }
-  return { open, setId, takenOn, by, note, readings, before, problem, theirs, busy, fill, add, typed, combined, wantsThird, values, questions, save, close: () => { open.value = false } }
+  return { open, setId, takenOn, by, note, readings, before, problem, theirs, busy, fill, add, setReading, typed, combined, wantsThird, values, questions, save, close: () => { open.value = false } }
 }
 export type SetForm = ReturnType<typeof useSetForm>
