@@ -26,11 +26,21 @@ export function ledgerOf(state: ProjectState): Ledger {
         changeId: change.id, sampleNumber: numberOf.get(change.sampleId) ?? 1, carriedTo: change.carriedTo, title: change.title, edge: step.edge, amountMm: step.amountMm, side: step.side,
         transferred: piece ? isTransferred(state, change.id, piece.id) : false,
       })
-      const total = entry.totals.find(({ edge, side }) => edge === step.edge && side === step.side)
-      if (total) total.amountMm += step.amountMm
-      else entry.totals.push({ edge: step.edge, side: step.side, amountMm: step.amountMm })
       byRole.set(step.pieceRole, entry)
     }
   }
+  for (const entry of byRole.values()) entry.totals = totalsOf(entry.lines)
   return { pieces: [...byRole.values()] }
+}
+
+/** What each edge adds up to: right and left apart as soon as one change was for one side only, because the paper then differs. */
+export function totalsOf(lines: LedgerPiece['lines']): LedgerPiece['totals'] {
+  return [...new Set(lines.map(({ edge }) => edge))].flatMap((edge) => {
+    const here = lines.filter((line) => line.edge === edge)
+    const sides = here.every(({ side }) => side === 'both') ? ['both' as const] : ['right' as const, 'left' as const]
+    return sides.flatMap((side) => {
+      const lying = here.filter((line) => line.side === 'both' || line.side === side)
+      return lying.length === 0 ? [] : [{ edge, side, amountMm: lying.reduce((sum, { amountMm }) => sum + amountMm, 0) }]
+    })
+  })
 }

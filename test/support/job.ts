@@ -9,7 +9,8 @@ export async function photograph({ width = 900, height = 1200, colour = '#8899aa
     IFD0: { Make: 'Test camera', ...(orientation ? { Orientation: String(orientation) } : {}) },
     ...(place ? { IFD3: { GPSLatitudeRef: 'N', GPSLatitude: '51/1 30/1 0/1', GPSLongitudeRef: 'W', GPSLongitude: '0/1 7/1 0/1' } } : {}),
   }
-  return picture.withExif(exif).toBuffer()
+  // The EXIF alone does not set it: the library writes the orientation it holds itself over it.
+  return (orientation ? picture.withExif(exif).withMetadata({ orientation }) : picture.withExif(exif)).toBuffer()
 }
 
 /** A size chart of three sizes, in mm. */

@@ -35,7 +35,7 @@ export function useFinalCut(projectId: string) {
   let sending = false
   function change(next: Change) {
     if (!finalCut.value) return
-    waiting = { ...waiting, ...next, ...(next.ticks || waiting?.ticks ? { ticks: { ...waiting?.ticks, ...next.ticks } } : {}) }
+    waiting = together(waiting, next)
     show(next)
     void send()
   }
@@ -57,9 +57,11 @@ export function useFinalCut(projectId: string) {
       waiting = null
       try {
         finalCut.value = await call(updateFinalCut, { params, body: { ...body, version: finalCut.value!.version } })
+        // What was ticked while this was on its way is not in the answer yet and stays on screen.
+        if (waiting) show(waiting)
         saveProblem.value = ''
       } catch (failure) {
-        waiting = { ...body, ...(waiting as Change | null) }
+        waiting = together(body, waiting)
         if (failure instanceof ApiError && failure.code === 'version.stale' && failure.details.theirs) {
           finalCut.value = failure.details.theirs as FinalCut
           show(waiting)
@@ -93,6 +95,12 @@ export function useFinalCut(projectId: string) {
     clear: () => decide(() => call(clearToCut, { params })),
     cut: () => decide(() => call(markCut, { params })),
   }
+}
+
+/** Two changes as one, tick by tick and fact by fact; the later wins. */
+function together(earlier: Change | null, later: Change | null): Change {
+  const of = <K extends 'ticks' | 'cloth' | 'shrinkage'>(key: K) => (earlier?.[key] || later?.[key] ? { [key]: { ...earlier?.[key], ...later?.[key] } } : {})
+  return { ...earlier, ...later, ...of('ticks'), ...of('cloth'), ...of('shrinkage') }
 }
 
 const wordsOf = (failure: unknown) => (failure instanceof Error ? failure.message : 'This did not reach the journal.')
