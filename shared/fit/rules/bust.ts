@@ -8,8 +8,7 @@ export const bustRules: readonly Rule[] = [
     sentence: 'The front is too narrow and too short over the bust.',
     recognise: 'Slanting folds point at the bust, the armhole edge stands off and the front hem lifts, while neck and shoulder lie well.',
     words: ['full bust', 'bust too small', 'strain across the bust', 'front rides up'],
-    // Princess seams and fronts without a dart are changed differently: they have rules of their own.
-    when: { kinds: ['bodice', 'shirt', 'dress', 'jacket', 'coat'], without: ['princess-seams', 'dartless'] },
+    when: { kinds: ['bodice', 'shirt', 'dress', 'jacket', 'coat'] },
     sided: 'either',
     signs: [
       // The exact sign first, with its target; then the same sign seen less exactly. The strongest that fits counts.
@@ -38,9 +37,15 @@ export const bustRules: readonly Rule[] = [
     change: {
       operation: 'full-bust',
       steps: [
-        { piece: 'bodice-front', edge: 'bust line', edges: 2, share: 'width', taper: 'to nothing at the armhole hinge', text: 'Slash from the waist to the bust point and on to a hinge on the armhole, and from the side seam to the bust point. Spread by {amount} across the bust on the {side} half-front.' },
-        { piece: 'bodice-front', edge: 'centre front below the bust', edges: 2, share: 'length', times: 0, text: 'Cut across below the bust and lower the centre front until the hem meets again: the spread says how much.' },
+        { piece: 'bodice-front', edge: 'bust line', edges: 2, share: 'width', taper: 'to nothing at the armhole hinge', text: 'Slash from the waist to the bust point and on to a hinge on the armhole, and from the side seam to the bust point. Spread by {amount} across the bust on the {side} half-front.', when: { without: ['princess-seams', 'dartless'] } },
+        // Most goes onto the side front, so that the seam stays over the bust point: 7/8 in and 1/2 in where both were let out.
+        { piece: 'side-front', edge: 'princess seam at bust level', edges: 2, share: 'width', group: 'side-front', taper: 'to nothing at the armhole hinge', text: 'Slash the {side} side front across at the bust point, to a hinge at the side seam, and from there to a hinge on the armhole. Spread by {amount} and redraw the curve of the seam.', when: { needs: ['princess-seams'] } },
+        { piece: 'bodice-front', edge: 'princess seam at bust level', edges: 2, share: 'width', group: 'front panel', taper: 'to nothing above and below the bust', text: 'Let the seam of the {side} front panel out by {amount} at bust level, to nothing above and below; walk both edges of the seam.', when: { needs: ['princess-seams'] } },
+        { piece: 'bodice-front', edge: 'bust line', edges: 2, share: 'width', taper: 'to nothing at the armhole hinge', text: 'Slash from the hem to the bust point and on to a hinge on the armhole, and from the side seam to the bust point. Spread by {amount} across the bust on the {side} half-front. The dart that opens at the side is sewn, or turned into the hem or the armhole.', when: { needs: ['dartless'], without: ['princess-seams'] } },
+        { piece: 'bodice-front', edge: 'centre front below the bust', edges: 2, share: 'length', times: 0, text: 'Cut across below the bust and lower the centre front until the hem meets again: the spread says how much.', when: { without: ['princess-seams'] } },
+        { piece: 'bodice-front', edge: 'front panel at bust level', edges: 2, share: 'length', times: 0, text: 'Cut the front panel across at bust level and lengthen it by as much as the side front opened there.', when: { needs: ['princess-seams'] } },
       ],
+      parts: { 'side-front': 0.64, 'front panel': 0.36 },
       companions: [
         { piece: 'front-facing', text: 'Lengthen the front facing as the centre front.' },
         { piece: 'lining', text: 'Change the front lining alike.', when: { needs: ['lining'] } },
@@ -54,7 +59,7 @@ export const bustRules: readonly Rule[] = [
     moves: [{ cause: 'bust-point-low', note: 'A full-bust change lowers the bust point by itself: look at the dart point again on the next sample.' }],
     predicts: 'The front lies over the bust without strain.',
     recheck: ['front hem and front waist level', 'height of the dart point', 'armhole edge', 'width at the waist'],
-    source: 'common practice; choice of size by the high bust: Principles of Pattern Alteration, E-372, Texas Cooperative Extension, 2006',
+    source: 'common practice (darted, princess seams and without a dart); choice of size by the high bust: Principles of Pattern Alteration, E-372, Texas Cooperative Extension, 2006',
     rivals: [
       {
         cause: 'bust-girth-tight',
@@ -91,10 +96,12 @@ export const bustRules: readonly Rule[] = [
       { sign: 'drops', zone: ['hem', 'waist'], view: 'front', weight: 'slight', because: 'the front hangs low' },
       { sign: 'tight', zone: 'bust', weight: 'decisive', against: true, because: 'a bust that strains is not too roomy' },
       { sign: 'excess', zone: ['bust', 'upper-back'], view: 'back', weight: 'fair', against: true, because: 'a back as loose as the front asks for a smaller size' },
+      { sign: 'excess', zone: 'bust', line: 'side-seam', weight: 'slight', against: true, because: 'folds at the side seams are spare girth' },
     ],
     measures: [{ plus: ['drafted-cup', 'body:high-bust'], minus: ['body:bust'], grades: [{ from: 20, weight: 'strong' }, { from: 10, weight: 'fair' }, { below: 0, weight: 'strong', against: true }], amount: 1, alone: true, because: 'the pattern is drafted for a cup {value} larger' }],
     amounts: { direction: -1, usualMm: [13, 25, 38] },
-    change: { operation: 'full-bust', steps: [{ piece: 'bodice-front', edge: 'bust line', edges: 2, share: 'width', taper: 'to nothing at the armhole hinge', text: 'Slash as for a full bust and overlap {amount} across the bust on the {side} half-front; shorten the centre front until the hem meets.' }], companions: [{ piece: 'front-facing', text: 'Shorten the front facing as the centre front.' }, { piece: 'lining', text: 'Change the front lining alike.', when: { needs: ['lining'] } }] },
+    change: { operation: 'full-bust', steps: [{ piece: 'bodice-front', edge: 'bust line', edges: 2, share: 'width', taper: 'to nothing at the armhole hinge', text: 'Slash as for a full bust and overlap {amount} across the bust on the {side} half-front; shorten the centre front until the hem meets.', when: { without: ['princess-seams'] } },
+      { piece: 'side-front', edge: 'princess seam at bust level', edges: 2, share: 'width', taper: 'to nothing at the armhole hinge', text: 'Flatten the curve of the {side} side front: overlap {amount} at bust level and shorten the front panel until the seam meets.', when: { needs: ['princess-seams'] } }], companions: [{ piece: 'front-facing', text: 'Shorten the front facing as the centre front.' }, { piece: 'lining', text: 'Change the front lining alike.', when: { needs: ['lining'] } }] },
     limits: { leastMm: 6, mostMm: 80, beyond: 'Begin from a pattern drafted for a smaller cup.' }, stage: 'bust', opposite: 'full-bust', predicts: 'The front lies smooth over the bust.', recheck: ['dart tip', 'front hem'], source: 'common practice (overlap at the bust point, hinge a third up the armhole)',
     rivals: [{ cause: 'bust-girth-loose', check: { ask: 'Is the back at bust level close?', yes: 'Only the front is too roomy.', no: 'The whole girth is loose.' } }, { cause: 'bust-point-low', check: { ask: 'Does the dart point at the fullest place?', yes: 'The dart is in place: cloth is spare.', no: 'Move the dart first.' } }],
     drawing: { sign: { figure: 'front', region: [0.25, 0.12, 0.75, 0.5], strokes: [{ kind: 'fold', from: [0.4, 0.26], to: [0.46, 0.26], bend: 0.03 }, { kind: 'fold', from: [0.54, 0.26], to: [0.6, 0.26], bend: 0.03 }] }, change: { piece: 'bodice-front', marks: [{ kind: 'cut', from: [0.45, 1], to: [0.45, 0.5] }, { kind: 'overlap', from: [0.45, 0.5], to: [0.5, 0.5], label: 'overlapped' }] } },

@@ -7,13 +7,14 @@ const liningAlike = { piece: 'lining', text: 'Change the lining alike.', when: {
 const capWalk = { piece: 'sleeve', text: 'Walk the sleeve cap against the new armhole.', when: { sleeves: ['set-in', 'raglan'] } } as const
 const slope = 'Handbook series by Cowan on the shoulder (pinned at the tip, armhole lowered equally); Fitting Dresses, U.S. Department of Agriculture, 1946 (slanting shoulders); amounts: common practice'
 
+// A fold pinned along the shoulder seam comes off front and back by its depth each, hence half of the cloth in it.
 export const shoulderRules: readonly Rule[] = [
   {
     cause: 'sloping-shoulders', title: 'Lower both shoulder tips and the armholes with them', sentence: 'The shoulder seam is higher at the tip than it needs to be.',
     recognise: 'Slanting folds run from the side of the neck into the armhole, and the armhole collapses.', words: ['sloping shoulders', 'folds from neck to armhole'],
     when: uppers, sided: 'both',
     signs: [
-      { sign: 'drag-lines', zone: ['shoulder', 'neck'], side: 'both', direction: 'diagonal', towards: ['armhole', 'underarm'], weight: 'strong', because: 'folds from the neck to the armhole say that the tip stands too high', amounts: { shift: 1, 'fold-depth': 1, cloth: 1 }, after: 'The folds from neck to armhole are gone.' },
+      { sign: 'drag-lines', zone: ['shoulder', 'neck'], side: 'both', direction: 'diagonal', towards: ['armhole', 'underarm'], weight: 'strong', because: 'folds from the neck to the armhole say that the tip stands too high', amounts: { shift: 1, 'fold-depth': 0.5, cloth: 1 }, after: 'The folds from neck to armhole are gone.' },
       { sign: 'excess', zone: ['shoulder', 'armhole'], side: 'both', direction: 'diagonal', weight: 'strong', because: 'spare cloth slants into the armhole', amounts: { shift: 1, 'fold-depth': 0.5, cloth: 0.5 } },
       { sign: 'drops', zone: 'hem', side: 'both', weight: 'slight', because: 'the side hem drops' },
       { sign: 'drag-lines', zone: 'shoulder', towards: 'shoulder-tip', weight: 'strong', against: true, because: 'lines that point to the tip say that the tip is too low' },
@@ -32,8 +33,8 @@ export const shoulderRules: readonly Rule[] = [
     recognise: 'Slanting folds run from the neck into one armhole only; neckline and hem tilt.', words: ['one shoulder lower', 'uneven shoulders', 'asymmetric'],
     when: uppers, sided: 'one',
     signs: [
-      { sign: 'drag-lines', zone: ['shoulder', 'neck', 'armhole'], side: 'one', weight: 'strong', because: 'the folds are on that side only', amounts: { shift: 1, cloth: 1 } },
-      { sign: 'drag-lines', zone: ['shoulder', 'neck'], side: 'one', direction: 'diagonal', towards: ['armhole', 'underarm'], weight: 'decisive', because: 'folds from the neck to one armhole say that this shoulder is lower', amounts: { shift: 1, cloth: 1 }, after: 'Both shoulders lie alike.' },
+      { sign: 'drag-lines', zone: ['shoulder', 'neck', 'armhole'], side: 'one', weight: 'strong', because: 'the folds are on that side only', amounts: { shift: 1, 'fold-depth': 0.5, cloth: 1 } },
+      { sign: 'drag-lines', zone: ['shoulder', 'neck'], side: 'one', direction: 'diagonal', towards: ['armhole', 'underarm'], weight: 'decisive', because: 'folds from the neck to one armhole say that this shoulder is lower', amounts: { shift: 1, 'fold-depth': 0.5, cloth: 1 }, after: 'Both shoulders lie alike.' },
       { sign: 'drops', zone: ['shoulder', 'armhole'], side: 'one', weight: 'decisive', because: 'that shoulder lies lower', amounts: { shift: 1 }, after: 'Both shoulders lie alike.' },
       { sign: 'excess', zone: ['shoulder', 'armhole'], side: 'one', weight: 'strong', because: 'spare cloth lies on that side only', amounts: { shift: 1, 'fold-depth': 0.5, cloth: 0.5 } },
     ],
